@@ -1,0 +1,150 @@
+import type { Bed, BedAssignment, BedStay } from '../contract/board.ts';
+import { bedFlags } from '../flags/bed-flags.ts';
+import { predictedBodyWeight } from '../physiology/predicted-body-weight.ts';
+import { ladderFor, type Policy } from '../policy/policy.ts';
+import { supportEntry } from '../support/catalogue.ts';
+import { airwayNow, deviceNow } from './airway-now.ts';
+import { deriveCheck } from './derive-check.ts';
+import { deriveGas } from './derive-gas.ts';
+import type { StayFacts } from './facts.ts';
+import { latestOf } from './latest-of.ts';
+import { settingsChangedAfter } from './settings-changed-after.ts';
+
+/** The place itself, without anything that changes by the hour. */
+export type BedPlace = Pick<Bed, 'bedId' | 'unitId' | 'label' | 'row' | 'column' | 'isOpen'>;
+
+/**
+ * A bed's board row, from the facts of the stay in it. Pure and without a clock: it holds the times of
+ * things and never their ages, so the same row is right at any later moment until a fact changes.
+ */
+export function bedBoard({
+  place,
+  revision,
+  facts,
+  policy,
+  assignments,
+  ventilator,
+}: {
+  place: BedPlace;
+  revision: number;
+  facts: StayFacts | null;
+  policy: Policy;
+  assignments: BedAssignment[];
+  ventilator: Bed['ventilator'];
+}): Bed {
+  return { ...place, revision, stay: facts ? stayRow(facts, policy) : null, assignments, ventilator };
+}
+
+function stayRow(facts: StayFacts, policy: Policy): BedStay {
+  const { patient, difficultAirway, precautions, careLimits, orders } = facts.details;
+  const predictedBodyWeightKg = weightOf(patient);
+  const check = checkRow(facts, predictedBodyWeightKg);
+  const device = deviceNow(facts);
+  const stay: Omit<BedStay, 'flags'> = {
+    stayId: facts.stayId,
+    version: facts.version,
+    admittedAt: facts.admittedAt,
+    patient,
+    predictedBodyWeightKg,
+    difficultAirway,
+    precautions,
+    careLimits,
+    orders,
+    support: facts.support
+      ? {
+          id: facts.support.id,
+          shortName: supportEntry(facts.support.id).shortName,
+          sinceAt: facts.support.sinceAt,
+        }
+      : null,
+    ...courseOf(facts),
+    check,
+    device,
+    airway: airwayNow(facts, device),
+    gas: gasRow(facts, predictedBodyWeightKg),
+    ladder: ladderFor(policy.freshness, orders),
+    plateauLimitCmH2O: policy.thresholds.plateauHighCmH2O,
+    withdrawn: { check: null, airway: null, gas: null },
+  };
+  return { ...stay, flags: bedFlags({ stay, thresholds: policy.thresholds }) };
+}
+
+/** Null without sex or height, and where the formula gives no weight: then nothing is judged per kg. */
+function weightOf({ sex, heightCm }: StayFacts['details']['patient']): number | null {
+  return sex === null || heightCm === null ? null : predictedBodyWeight({ sex, heightCm });
+}
+
+function checkRow(facts: StayFacts, predictedBodyWeightKg: number | null): BedStay['check'] {
+  const latest = facts.checks[0];
+  if (!latest) return null;
+  const { observationId, observedAt, recordedAt, recordedByInitials, body } = latest;
+  const passive = body.passive ?? null;
+  return {
+    observationId,
+    observedAt,
+    recordedAt,
+    recordedByInitials,
+    changedSinceAt: supportChangedAfter(facts, observedAt),
+    mode: body.mode,
+    settings: defined(body.settings),
+    readings: defined(body.readings),
+    limits: defined(body.limits),
+    interface: body.interface ?? null,
+    passive,
+    derived: deriveCheck({
+      check: { mode: body.mode, settings: defined(body.settings), readings: defined(body.readings), passive },
+      predictedBodyWeightKg,
+    }),
+  };
+}
+
+/** An extubation after the check: the check was true, but not of what the patient breathes with now. */
+function supportChangedAfter(facts: StayFacts, observedAt: string): string | null {
+  return (
+    facts.happenings.find((fact) => fact.body.toSupport !== undefined && fact.observedAt > observedAt)
+      ?.observedAt ?? null
+  );
+}
+
+function gasRow(facts: StayFacts, predictedBodyWeightKg: number | null): BedStay['gas'] {
+  const { gas } = facts;
+  if (!gas) return null;
+  const { observationId, observedAt, recordedAt, recordedByInitials, body } = gas;
+  const { observedAt: _observedAt, confirmedUnusual: _confirmed, note: _note, site, ...values } = body;
+  const atDraw = facts.checks.find((check) => check.observedAt <= observedAt);
+  return {
+    observationId,
+    observedAt,
+    recordedAt,
+    recordedByInitials,
+    changedSinceAt: settingsChangedAfter(facts, observedAt),
+    site,
+    values: defined(values),
+    ...deriveGas({
+      gas: body,
+      predictedBodyWeightKg,
+      minuteVolumeLMin: atDraw?.body.readings.minuteVolumeLMin ?? null,
+    }),
+  };
+}
+
+function courseOf({ happenings }: StayFacts): Pick<BedStay, 'proneSinceAt' | 'away' | 'trial'> {
+  const position = latestOf(happenings, ['proned', 'supine']);
+  const transport = latestOf(happenings, ['left-for-transport', 'back-from-transport']);
+  const trial = latestOf(happenings, ['trial-started', 'trial-passed', 'trial-failed']);
+  return {
+    proneSinceAt: position?.body.kind === 'proned' ? position.observedAt : null,
+    away:
+      transport?.body.kind === 'left-for-transport'
+        ? { sinceAt: transport.observedAt, to: transport.body.detail ?? null }
+        : null,
+    trial: trial?.body.kind === 'trial-started' ? { startedAt: trial.observedAt } : null,
+  };
+}
+
+/** Only the keys that were recorded: a missing reading is missing, not undefined and not zero. */
+function defined<Value>(values: Record<string, Value | undefined>): Record<string, Value> {
+  const kept: Record<string, Value> = {};
+  for (const [key, value] of Object.entries(values)) if (value !== undefined) kept[key] = value;
+  return kept;
+}
