@@ -33,8 +33,8 @@ export type StayDetails = z.infer<typeof StayDetails>;
 export const Admission = StayDetails.extend({ bedId: Id, observedAt: Instant });
 export type Admission = z.infer<typeof Admission>;
 
-/** Correct identity or orders; `observedAt` is when it became true (now, where left out). */
-export const StayCorrection = StayDetails.partial().extend({ observedAt: Instant.optional() });
+/** Correct who the patient is, or what is ordered; what is left out stays as it is. */
+export const StayCorrection = StayDetails.partial();
 export type StayCorrection = z.infer<typeof StayCorrection>;
 
 export const Transfer = z.strictObject({ bedId: Id, observedAt: Instant });

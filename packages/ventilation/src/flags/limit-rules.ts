@@ -1,0 +1,100 @@
+import type { BedCheck } from '../contract/board.ts';
+import { LIMIT_FIELDS, type LimitKey, READING_FIELDS, type ReadingKey } from '../entry/fields.ts';
+import { formatWithUnit } from '../format/number.ts';
+import { supportEntry } from '../support/catalogue.ts';
+import { chip, type Finding, type FlagRule, input } from './rule.ts';
+
+const SOURCE =
+  'common practice in teaching texts: in volume control the pressure limits guard, in pressure control the volume limits';
+
+type AuditedLimit = {
+  key: LimitKey;
+  id: string;
+  /** What it is called on a chip. */
+  chip: string;
+  side: 'high' | 'low';
+  /** The readings that it guards; the first that was recorded is held against it. */
+  guards: readonly ReadingKey[];
+};
+
+const LIMITS: readonly AuditedLimit[] = [
+  { key: 'highPressureCmH2O', id: 'high-pressure', chip: 'P', side: 'high', guards: ['peakCmH2O'] },
+  { key: 'lowVtMl', id: 'low-vt', chip: 'Vt', side: 'low', guards: ['vtExhaledMl', 'vtReleaseMl'] },
+  {
+    key: 'lowMinuteVolumeLMin',
+    id: 'low-minute-volume',
+    chip: 'MV',
+    side: 'low',
+    guards: ['minuteVolumeLMin'],
+  },
+  {
+    key: 'highMinuteVolumeLMin',
+    id: 'high-minute-volume',
+    chip: 'MV',
+    side: 'high',
+    guards: ['minuteVolumeLMin'],
+  },
+  { key: 'highRatePerMin', id: 'high-rate', chip: 'Rate', side: 'high', guards: ['rateTotalPerMin'] },
+  { key: 'apnoeaS', id: 'apnoea', chip: 'Apnoea', side: 'high', guards: [] },
+];
+
+/** The limit audit: one row a limit and fault, so that two limits that are off are two flags. */
+export const LIMIT_RULES: readonly FlagRule[] = [
+  ...LIMITS.map((limit) =>
+    rule({ id: `limit-off-${limit.id}`, find: (check) => limitOff({ check, limit }) }),
+  ),
+  ...LIMITS.map((limit) =>
+    rule({ id: `limit-passed-${limit.id}`, find: (check) => limitPassed({ check, limit }) }),
+  ),
+  rule({ id: 'limits-not-recorded', find: limitsNotRecorded }),
+];
+
+function rule({ id, find }: { id: string; find: (check: BedCheck) => Finding | null }): FlagRule {
+  return { id, from: ['check'], source: SOURCE, find: ({ check }) => check && find(check) };
+}
+
+function limitOff({ check, limit }: { check: BedCheck; limit: AuditedLimit }): Finding | null {
+  if (check.limits[limit.key] !== 'off' || !mustStand(check, limit.key)) return null;
+  const { label } = LIMIT_FIELDS[limit.key];
+  return {
+    level: 'attention',
+    short: limit.key === 'apnoeaS' ? 'Apnoea off' : chip(`${limit.chip} limit off`),
+    sentence: `${label} is off; ${supportEntry(check.mode).shortName} must not run without it.`,
+    inputs: [],
+  };
+}
+
+/** Limits that guard what the mode does not fix; and where each breath is the patient's own, that there is one. */
+function mustStand({ mode }: BedCheck, key: LimitKey): boolean {
+  const { requiredLimits, sequence } = supportEntry(mode);
+  return requiredLimits.includes(key) || (key === 'apnoeaS' && sequence === 'CSV');
+}
+
+function limitPassed({ check, limit }: { check: BedCheck; limit: AuditedLimit }): Finding | null {
+  const set = check.limits[limit.key];
+  const guarded = limit.guards.find((reading) => check.readings[reading] !== undefined);
+  const value = guarded && check.readings[guarded];
+  if (typeof set !== 'number' || guarded === undefined || value === undefined) return null;
+  if (limit.side === 'high' ? value < set : value > set) return null;
+  const [reading, field] = [READING_FIELDS[guarded], LIMIT_FIELDS[limit.key]];
+  return {
+    level: 'attention',
+    short: chip(`${limit.chip} past limit`),
+    sentence: `${reading.label} is ${formatWithUnit(value, reading)}, at or past its own ${limit.side} limit of ${formatWithUnit(set, field)}.`,
+    inputs: [input(reading.label, value, reading), input(field.label, set, field)],
+  };
+}
+
+function limitsNotRecorded(check: BedCheck): Finding | null {
+  const { requiredLimits, shortName } = supportEntry(check.mode);
+  const missing = requiredLimits.filter((key) => check.limits[key] === undefined);
+  if (missing.length === 0) return null;
+  const none = Object.keys(check.limits).length === 0;
+  const names = missing.map((key) => LIMIT_FIELDS[key].label.toLowerCase()).join(' and ');
+  return {
+    level: 'note',
+    short: none ? 'No limits noted' : 'Limit not noted',
+    sentence: `Alarm limits not recorded with this check: ${shortName} needs the ${names}.`,
+    inputs: [],
+  };
+}

@@ -1,0 +1,22 @@
+import { requireNumbers } from '../units/require-number.ts';
+
+/**
+ * Gas moved each minute: `ratePerMin × tidalVolumeMl ÷ 1000`. Exhaled volume and total rate.
+ *
+ * @param input.ratePerMin total breaths, /min (0 to 200).
+ * @param input.tidalVolumeMl exhaled tidal volume, mL (1 to 3000).
+ * @returns L/min.
+ * @throws RangeError on missing, non-finite or impossible input.
+ *
+ * @source definition.
+ */
+export function minuteVentilation({
+  ratePerMin,
+  tidalVolumeMl,
+}: {
+  ratePerMin: number;
+  tidalVolumeMl: number;
+}): number {
+  requireNumbers({ ratePerMin, tidalVolumeMl });
+  return (ratePerMin * tidalVolumeMl) / 1000;
+}

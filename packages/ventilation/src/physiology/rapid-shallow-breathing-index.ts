@@ -1,0 +1,23 @@
+import { requireNumbers } from '../units/require-number.ts';
+
+/**
+ * Rate over tidal volume in litres: fast small breaths predict a failed trial: `ratePerMin ÷ (tidalVolumeMl ÷ 1000)`.
+ * Valid for about a minute of unsupported spontaneous breathing; the published cut-off is 105.
+ *
+ * @param input.ratePerMin spontaneous rate, /min (1 to 200); no breath is refused, for its index would look good.
+ * @param input.tidalVolumeMl spontaneous tidal volume, mL (1 to 3000).
+ * @returns breaths per minute per litre.
+ * @throws RangeError on missing, non-finite or impossible input.
+ *
+ * @source Yang KL, Tobin MJ, N Engl J Med 1991;324:1445–50.
+ */
+export function rapidShallowBreathingIndex({
+  ratePerMin,
+  tidalVolumeMl,
+}: {
+  ratePerMin: number;
+  tidalVolumeMl: number;
+}): number {
+  requireNumbers({ ratePerMin, tidalVolumeMl }, { ratePerMin: [1, 200] });
+  return (ratePerMin * 1000) / tidalVolumeMl;
+}
