@@ -1,0 +1,2 @@
+/** The release, put in by the build. */
+declare const VERSION: string;
