@@ -7,7 +7,6 @@ import { makeApp } from './http/app.ts';
 import { migrateDatabase, openDatabase } from './queries/database.ts';
 import { deleteKeysBefore } from './queries/idempotency-keys.ts';
 import { openLiveLink } from './realtime/live-link.ts';
-import { fillDemo } from './services/fill-demo.ts';
 import { signIns } from './services/sign-ins.ts';
 
 const KEYS_KEPT_DAYS = 7;
@@ -24,7 +23,8 @@ export async function startServer(
   const db = await openDatabase(settings.database);
   await migrateDatabase(db);
   const deps: Deps = { db, settings, signIns: signIns(db, settings), live: { tell: () => {}, drop: () => {} }, log, version, now };
-  if (settings.demo) await fillDemo(deps);
+  // The invented hospital is loaded only where it is asked for.
+  if (settings.demo) await (await import('./services/fill-demo.ts')).fillDemo(deps);
 
   const httpServer = createServer();
   const live = openLiveLink(httpServer, deps);
