@@ -30,12 +30,19 @@ export default defineConfig(({ isSsrBuild }) => ({
     port: serverPort + 1,
     strictPort: true,
     proxy: {
-      '/api': `http://127.0.0.1:${serverPort}`,
-      '/socket.io': { target: `http://127.0.0.1:${serverPort}`, ws: true },
+      // The host is passed on as it was asked for, so that the server sees its own pages as such.
+      '/api': { target: `http://127.0.0.1:${serverPort}`, changeOrigin: false },
+      '/socket.io': { target: `http://127.0.0.1:${serverPort}`, changeOrigin: false, ws: true },
     },
   },
   build: isSsrBuild
-    ? { outDir: 'apps/server/dist/server', emptyOutDir: true, target: 'node20', sourcemap: true }
+    ? {
+        outDir: 'apps/server/dist/server',
+        emptyOutDir: true,
+        target: 'node20',
+        sourcemap: true,
+        rolldownOptions: { input: { main: 'apps/server/src/main.ts', 'rebuild-board': 'apps/server/src/rebuild-board.ts' } },
+      }
     : {
         outDir: 'apps/server/dist/public',
         emptyOutDir: true,

@@ -6,13 +6,19 @@ export async function up(db: Knex): Promise<void> {
     table.text('id').primary();
     table.text('unit_id').notNullable().references('units.id');
     table.text('bed_id').references('beds.id');
+    table.text('hospital_number').notNullable();
     table.text('admitted_at').notNullable();
     table.text('left_at');
     table.text('outcome');
+    // When the board learnt of the stay and of its end: a look back asks who was there by these.
+    table.text('recorded_at').notNullable();
+    table.text('left_recorded_at');
     table.integer('version').notNullable().defaultTo(1);
+    table.index(['left_recorded_at', 'recorded_at']);
     table.check('(left_at is null) = (bed_id is not null)', [], 'stays_bed_until_left');
   });
   await db.raw('CREATE UNIQUE INDEX stays_one_per_bed ON stays (bed_id) WHERE left_at IS NULL');
+  await db.raw('CREATE UNIQUE INDEX stays_one_per_patient ON stays (hospital_number) WHERE left_at IS NULL');
 
   await db.schema.createTable('observations', (table) => {
     table.increments('sequence');

@@ -1,2 +1,0 @@
-/** The release, put in by the build. */
-declare const VERSION: string;
