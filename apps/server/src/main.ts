@@ -6,8 +6,14 @@ import { startServer } from './start-server.ts';
 /** The one file of the server that acts when it is imported. */
 async function main(): Promise<void> {
   const settings = readSettings(process.env);
-  const server = await startServer(settings, { version: release.version, publicFolder: join(import.meta.dirname, '..', 'public') });
-  server.deps.log.info({ url: server.url, database: settings.database, demonstration: settings.demo }, 'serving');
+  const server = await startServer(settings, {
+    version: release.version,
+    publicFolder: join(import.meta.dirname, '..', 'public'),
+  });
+  server.deps.log.info(
+    { url: server.url, database: settings.database, demonstration: settings.demo },
+    'serving',
+  );
   if (settings.demo) process.stdout.write(demoWords(server.url));
 
   let stopping = false;

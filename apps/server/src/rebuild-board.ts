@@ -7,7 +7,9 @@ async function main(): Promise<void> {
   const db = await openDatabase(readSettings(process.env).database);
   try {
     const { beds, differed } = await rebuildAllBeds(db, { now: new Date().toISOString() });
-    process.stdout.write(`${beds} beds rebuilt from the facts, ${differed.length} differed${differed.length > 0 ? `: ${differed.join(', ')}` : ''}\n`);
+    process.stdout.write(
+      `${beds} beds rebuilt from the facts, ${differed.length} differed${differed.length > 0 ? `: ${differed.join(', ')}` : ''}\n`,
+    );
   } finally {
     await db.destroy();
   }

@@ -17,12 +17,24 @@ export type Running = { deps: Deps; url: string; stop: () => Promise<void> };
 /** Opens the record, brings it up to date, and serves. `now` and `publicFolder` are the tests' to choose. */
 export async function startServer(
   settings: Settings,
-  { version, publicFolder, now = () => new Date() }: { version: string; publicFolder: string; now?: () => Date },
+  {
+    version,
+    publicFolder,
+    now = () => new Date(),
+  }: { version: string; publicFolder: string; now?: () => Date },
 ): Promise<Running> {
   const log = pino({ level: settings.logLevel });
   const db = await openDatabase(settings.database);
   await migrateDatabase(db);
-  const deps: Deps = { db, settings, signIns: signIns(db, settings), live: { tell: () => {}, drop: () => {} }, log, version, now };
+  const deps: Deps = {
+    db,
+    settings,
+    signIns: signIns(db, settings),
+    live: { tell: () => {}, drop: () => {} },
+    log,
+    version,
+    now,
+  };
   // The invented hospital is loaded only where it is asked for.
   if (settings.demo) await (await import('./services/fill-demo.ts')).fillDemo(deps);
 
@@ -35,7 +47,10 @@ export async function startServer(
     httpServer.listen(settings.port, settings.host, resolve);
   });
 
-  const tidy = setInterval(() => void tidyUp(deps).catch((error: unknown) => log.error({ err: error }, 'tidying failed')), HOUR_MS);
+  const tidy = setInterval(
+    () => void tidyUp(deps).catch((error: unknown) => log.error({ err: error }, 'tidying failed')),
+    HOUR_MS,
+  );
   tidy.unref();
 
   return {

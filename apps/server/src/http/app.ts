@@ -26,7 +26,11 @@ export function makeApp(deps: Deps, { publicFolder }: { publicFolder: string }):
 
 function apiRouter(deps: Deps) {
   const router = express.Router();
-  router.use(neverStored, sameOriginWrites(deps.settings.origin), express.json({ limit: `${BODY_LIMIT_KB}kb`, strict: false }));
+  router.use(
+    neverStored,
+    sameOriginWrites(deps.settings.origin),
+    express.json({ limit: `${BODY_LIMIT_KB}kb`, strict: false }),
+  );
   router.post('/session', signInLimit());
   for (const route of routes) router[route.method](route.path.slice('/api'.length), serveRoute(deps, route));
   router.use(noSuchRoute);
@@ -40,7 +44,15 @@ function pages(publicFolder: string) {
     res.set('Cache-Control', 'no-cache').sendFile(join(publicFolder, 'apps', name, 'index.html'));
   };
   if (!existsSync(publicFolder)) return router;
-  router.use('/assets', express.static(join(publicFolder, 'assets'), { immutable: true, maxAge: '1y', index: false, fallthrough: false }));
+  router.use(
+    '/assets',
+    express.static(join(publicFolder, 'assets'), {
+      immutable: true,
+      maxAge: '1y',
+      index: false,
+      fallthrough: false,
+    }),
+  );
   router.use(express.static(publicFolder, { index: false, redirect: false }));
   router.get(['/wall', '/wall/*splat'], page('wall'));
   router.get(['/', '/*splat'], page('tablet'));
@@ -63,5 +75,7 @@ function requestLog({ log }: Deps) {
 
 function routeOf(req: object): string | null {
   const route: unknown = 'route' in req ? req.route : null;
-  return typeof route === 'object' && route !== null && 'path' in route && typeof route.path === 'string' ? route.path : null;
+  return typeof route === 'object' && route !== null && 'path' in route && typeof route.path === 'string'
+    ? route.path
+    : null;
 }

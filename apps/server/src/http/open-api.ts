@@ -11,9 +11,16 @@ export function openApi(routes: readonly Route[], version: string): object {
   }
   return {
     openapi: '3.1.0',
-    info: { title: 'Windrow', version, description: 'Ventilation census board. An information display: not a monitor, not an alarm.' },
+    info: {
+      title: 'Windrow',
+      version,
+      description: 'Ventilation census board. An information display: not a monitor, not an alarm.',
+    },
     paths,
-    components: { schemas: { Problem: schemaOf(Problem, 'output') }, securitySchemes: { session: { type: 'apiKey', in: 'cookie', name: 'windrow' } } },
+    components: {
+      schemas: { Problem: schemaOf(Problem, 'output') },
+      securitySchemes: { session: { type: 'apiKey', in: 'cookie', name: 'windrow' } },
+    },
   };
 }
 
@@ -28,12 +35,25 @@ function operation(route: Route): object {
       ...(route.kind === 'write' ? [header('Idempotency-Key', 'A UUID made for this entry')] : []),
       ...(route.versioned ? [header('If-Match', 'The version that was read, such as "3"')] : []),
     ],
-    ...(route.body ? { requestBody: { required: true, content: { 'application/json': { schema: schemaOf(route.body, 'input') } } } } : {}),
+    ...(route.body
+      ? {
+          requestBody: {
+            required: true,
+            content: { 'application/json': { schema: schemaOf(route.body, 'input') } },
+          },
+        }
+      : {}),
     responses: {
       [status]: route.response
-        ? { description: 'Done', content: { 'application/json': { schema: schemaOf(route.response, 'output') } } }
+        ? {
+            description: 'Done',
+            content: { 'application/json': { schema: schemaOf(route.response, 'output') } },
+          }
         : { description: 'Done' },
-      default: { description: 'Problem', content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } } },
+      default: {
+        description: 'Problem',
+        content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
+      },
     },
   };
 }
@@ -41,11 +61,20 @@ function operation(route: Route): object {
 function fields(schema: z.ZodType | undefined, where: 'path' | 'query'): object[] {
   if (!(schema instanceof z.ZodObject)) return [];
   return Object.entries(schema.shape).map(([name, field]) => ({
-    name, in: where, required: where === 'path', schema: schemaOf(field, 'input'),
+    name,
+    in: where,
+    required: where === 'path',
+    schema: schemaOf(field, 'input'),
   }));
 }
 
-const header = (name: string, description: string) => ({ name, in: 'header', required: true, description, schema: { type: 'string' } });
+const header = (name: string, description: string) => ({
+  name,
+  in: 'header',
+  required: true,
+  description,
+  schema: { type: 'string' },
+});
 
 function schemaOf(schema: z.core.$ZodType, io: 'input' | 'output'): object {
   const { $schema: _dialect, ...rest } = z.toJSONSchema(schema, { io, unrepresentable: 'any' });

@@ -2,7 +2,12 @@ import { z } from 'zod';
 
 /** `?limit=&cursor=`: how every list pages. */
 export const Paging = z.strictObject({
-  limit: z.coerce.number({ error: 'must be a whole number from 1 to 200' }).int().min(1, { error: 'must be 1 to 200' }).max(200, { error: 'must be 1 to 200' }).default(50),
+  limit: z.coerce
+    .number({ error: 'must be a whole number from 1 to 200' })
+    .int()
+    .min(1, { error: 'must be 1 to 200' })
+    .max(200, { error: 'must be 1 to 200' })
+    .default(50),
   cursor: z.string().max(200).optional(),
 });
 
@@ -11,8 +16,15 @@ export function pageOf<S extends z.ZodType>(item: S) {
 }
 
 /** One row more than asked for was read: whether there is a next page, and where it begins. */
-export function toPage<Row, Item>(rows: readonly Row[], limit: number, { item, cursor }: { item: (row: Row) => Item; cursor: (row: Row) => string }) {
+export function toPage<Row, Item>(
+  rows: readonly Row[],
+  limit: number,
+  { item, cursor }: { item: (row: Row) => Item; cursor: (row: Row) => string },
+) {
   const page = rows.slice(0, limit);
   const last = page.at(-1);
-  return { items: page.map(item), nextCursor: rows.length > limit && last !== undefined ? cursor(last) : null };
+  return {
+    items: page.map(item),
+    nextCursor: rows.length > limit && last !== undefined ? cursor(last) : null,
+  };
 }

@@ -8,7 +8,11 @@ import type { Write } from '../services/write.ts';
 type Schema = z.ZodType;
 type Parsed<S extends Schema | undefined> = S extends Schema ? z.infer<S> : undefined;
 
-export type Input<Params extends Schema | undefined, Query extends Schema | undefined, Body extends Schema | undefined> = {
+export type Input<
+  Params extends Schema | undefined,
+  Query extends Schema | undefined,
+  Body extends Schema | undefined,
+> = {
   params: Parsed<Params>;
   query: Parsed<Query>;
   body: Parsed<Body>;
@@ -41,30 +45,52 @@ export type Route = Common & {
   versioned?: boolean;
 } & (
     | { kind: 'read'; handle: (context: { deps: Deps; person: SignedIn; input: never }) => Promise<unknown> }
-    | { kind: 'write'; handle: (context: { deps: Deps; write: Write; input: never; version: number }) => Promise<unknown> }
-    | { kind: 'session'; handle: (context: { deps: Deps; person: SignedIn | null; input: never; req: Request; res: Response }) => Promise<unknown> }
+    | {
+        kind: 'write';
+        handle: (context: { deps: Deps; write: Write; input: never; version: number }) => Promise<unknown>;
+      }
+    | {
+        kind: 'session';
+        handle: (context: {
+          deps: Deps;
+          person: SignedIn | null;
+          input: never;
+          req: Request;
+          res: Response;
+        }) => Promise<unknown>;
+      }
   );
 
-type Typed<K extends 'read' | 'write' | 'session', P extends Schema | undefined, Q extends Schema | undefined, B extends Schema | undefined> =
-  Omit<Extract<Route, { kind: K }>, 'handle' | 'needs' | 'params' | 'query' | 'body'> & {
-    params?: P; query?: Q; body?: B;
-    needs: Needs<Input<P, Q, B>> | Exclude<Route['needs'], Needs<never>>;
-    handle: (context: Omit<Parameters<Extract<Route, { kind: K }>['handle']>[0], 'input'> & { input: Input<P, Q, B> }) => Promise<unknown>;
-  };
+type Typed<
+  K extends 'read' | 'write' | 'session',
+  P extends Schema | undefined,
+  Q extends Schema | undefined,
+  B extends Schema | undefined,
+> = Omit<Extract<Route, { kind: K }>, 'handle' | 'needs' | 'params' | 'query' | 'body'> & {
+  params?: P;
+  query?: Q;
+  body?: B;
+  needs: Needs<Input<P, Q, B>> | Exclude<Route['needs'], Needs<never>>;
+  handle: (
+    context: Omit<Parameters<Extract<Route, { kind: K }>['handle']>[0], 'input'> & { input: Input<P, Q, B> },
+  ) => Promise<unknown>;
+};
 
 /** Gives a route its types: what the handler receives is what the schemas parsed. */
 export function read<P extends Schema | undefined = undefined, Q extends Schema | undefined = undefined>(
   route: Omit<Typed<'read', P, Q, undefined>, 'kind' | 'method'>,
 ): Route {
-  return { ...route, kind: 'read', method: 'get' } as Route;
+  return { ...route, kind: 'read', method: 'get' };
 }
 
 export function write<P extends Schema | undefined = undefined, B extends Schema | undefined = undefined>(
   route: Omit<Typed<'write', P, undefined, B>, 'kind'>,
 ): Route {
-  return { ...route, kind: 'write' } as Route;
+  return { ...route, kind: 'write' };
 }
 
-export function session<B extends Schema | undefined = undefined>(route: Omit<Typed<'session', undefined, undefined, B>, 'kind'>): Route {
-  return { ...route, kind: 'session' } as Route;
+export function session<B extends Schema | undefined = undefined>(
+  route: Omit<Typed<'session', undefined, undefined, B>, 'kind'>,
+): Route {
+  return { ...route, kind: 'session' };
 }

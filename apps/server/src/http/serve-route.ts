@@ -33,10 +33,14 @@ export function serveRoute(deps: Deps, route: Route): RequestHandler {
       return;
     }
     const version = route.versioned ? readVersion(req) : 0;
-    const answer = await writeOnce(deps, { person, key: readKey(req), fingerprint: fingerprintOf(req) }, async (write) => ({
-      status: route.status ?? 200,
-      body: await route.handle({ deps, write, input, version }),
-    }));
+    const answer = await writeOnce(
+      deps,
+      { person, key: readKey(req), fingerprint: fingerprintOf(req) },
+      async (write) => ({
+        status: route.status ?? 200,
+        body: await route.handle({ deps, write, input, version }),
+      }),
+    );
     res.status(answer.status).json(answer.body);
   };
 }
@@ -70,7 +74,12 @@ async function requireMay(deps: Deps, route: Route, person: SignedIn, input: nev
 
 async function refused(deps: Deps, route: Route, person: SignedIn, unitId: string | null): Promise<Error> {
   await insertAudit(deps.db, {
-    at: deps.now().toISOString(), person_id: person.personId, act: `${route.method.toUpperCase()} ${route.path}`, unit_id: unitId, subject: null, outcome: 'refused',
+    at: deps.now().toISOString(),
+    person_id: person.personId,
+    act: `${route.method.toUpperCase()} ${route.path}`,
+    unit_id: unitId,
+    subject: null,
+    outcome: 'refused',
   });
   return notAllowed();
 }
@@ -78,7 +87,12 @@ async function refused(deps: Deps, route: Route, person: SignedIn, unitId: strin
 function readKey(req: Request): string {
   const key = Key.safeParse(req.get('Idempotency-Key'));
   if (!key.success) {
-    throw invalid([{ path: 'Idempotency-Key', message: `every write carries a UUID made for it, not ${JSON.stringify(req.get('Idempotency-Key') ?? null)}` }]);
+    throw invalid([
+      {
+        path: 'Idempotency-Key',
+        message: `every write carries a UUID made for it, not ${JSON.stringify(req.get('Idempotency-Key') ?? null)}`,
+      },
+    ]);
   }
   return key.data;
 }
@@ -88,7 +102,10 @@ function readVersion(req: Request): number {
   const header = req.get('If-Match');
   if (header === undefined) throw versionNeeded();
   const version = /^(?:W\/)?"?(\d{1,9})"?$/.exec(header.trim())?.[1];
-  if (version === undefined) throw invalid([{ path: 'If-Match', message: `must be the version that was read, such as "3", not ${header}` }]);
+  if (version === undefined)
+    throw invalid([
+      { path: 'If-Match', message: `must be the version that was read, such as "3", not ${header}` },
+    ]);
   return Number(version);
 }
 

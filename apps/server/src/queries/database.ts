@@ -8,7 +8,7 @@ import { migrationSource } from '../../../../db/migration-source.ts';
 /** Knex on better-sqlite3, with transactions that take the write lock at once: none can fail half-way for another's. */
 class ImmediateClient extends BetterSqliteClient {
   override transaction(...args: Parameters<Knex.Client['transaction']>) {
-    const begin = async (connection: BetterSqlite3.Database) => void connection.exec('BEGIN IMMEDIATE');
+    const begin = (connection: BetterSqlite3.Database) => Promise.resolve(connection.exec('BEGIN IMMEDIATE'));
     return Object.assign(super.transaction(...args), { begin });
   }
 }
@@ -34,7 +34,10 @@ export async function migrateDatabase(db: Knex): Promise<void> {
   await db.migrate.latest();
 }
 
-function prepare(connection: BetterSqlite3.Database, done: (error: Error | null, connection: unknown) => void) {
+function prepare(
+  connection: BetterSqlite3.Database,
+  done: (error: Error | null, connection: unknown) => void,
+) {
   try {
     const journal = connection.pragma('journal_mode = WAL', { simple: true });
     // After WAL and on every open: the driver falls back to NORMAL by itself, and a power cut would then lose answered writes.
@@ -45,7 +48,8 @@ function prepare(connection: BetterSqlite3.Database, done: (error: Error | null,
     const read = (name: string) => connection.pragma(name, { simple: true });
     if (read('synchronous') !== 2) throw new Error('the database does not keep synchronous=FULL');
     if (read('foreign_keys') !== 1) throw new Error('the database does not keep foreign keys');
-    if (journal !== 'wal' && !connection.memory) throw new Error(`the database does not keep a write-ahead log (journal mode ${String(journal)})`);
+    if (journal !== 'wal' && !connection.memory)
+      throw new Error(`the database does not keep a write-ahead log (journal mode ${String(journal)})`);
     done(null, connection);
   } catch (error) {
     done(error instanceof Error ? error : new Error(String(error)), connection);

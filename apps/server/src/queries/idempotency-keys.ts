@@ -1,8 +1,18 @@
 import type { Knex } from 'knex';
 
-type KeyRow = { person_id: string; key: string; request_hash: string; status: number; response: string; created_at: string };
+type KeyRow = {
+  person_id: string;
+  key: string;
+  request_hash: string;
+  status: number;
+  response: string;
+  created_at: string;
+};
 
-export async function answerForKey(db: Knex, { personId, key }: { personId: string; key: string }): Promise<KeyRow | null> {
+export async function answerForKey(
+  db: Knex,
+  { personId, key }: { personId: string; key: string },
+): Promise<KeyRow | null> {
   return (await db<KeyRow>('idempotency_keys').where({ person_id: personId, key }).first()) ?? null;
 }
 

@@ -18,7 +18,11 @@ export type ObservationRow = {
   body: string;
 };
 
-export type ObservationWithPerson = ObservationRow & { display_name: string; initials: string; amended_by_id: string | null };
+export type ObservationWithPerson = ObservationRow & {
+  display_name: string;
+  initials: string;
+  amended_by_id: string | null;
+};
 
 export async function insertObservation(db: Knex, row: Omit<ObservationRow, 'sequence'>): Promise<void> {
   await db<ObservationRow>('observations').insert(row);
@@ -36,17 +40,28 @@ export async function amendmentOf(db: Knex, id: string): Promise<ObservationWith
 /** Newest observed first; the sequence breaks ties, so that pages never skip or repeat one. */
 export async function recordPage(
   db: Knex,
-  { stayId, limit, before }: { stayId: string; limit: number; before: { observedAt: string; sequence: number } | null },
+  {
+    stayId,
+    limit,
+    before,
+  }: { stayId: string; limit: number; before: { observedAt: string; sequence: number } | null },
 ): Promise<ObservationWithPerson[]> {
   const query = withPeople(db)
     .where('observations.stay_id', stayId)
-    .orderBy([{ column: 'observations.observed_at', order: 'desc' }, { column: 'observations.sequence', order: 'desc' }])
+    .orderBy([
+      { column: 'observations.observed_at', order: 'desc' },
+      { column: 'observations.sequence', order: 'desc' },
+    ])
     .limit(limit);
   if (before) {
-    query.where((on) =>
+    void query.where((on) =>
       on
         .where('observations.observed_at', '<', before.observedAt)
-        .orWhere((tie) => tie.where('observations.observed_at', before.observedAt).where('observations.sequence', '<', before.sequence)),
+        .orWhere((tie) =>
+          tie
+            .where('observations.observed_at', before.observedAt)
+            .where('observations.sequence', '<', before.sequence),
+        ),
     );
   }
   return query;
@@ -56,11 +71,16 @@ function withPeople(db: Knex) {
   return db<ObservationRow>('observations')
     .join('people', 'people.id', 'observations.recorded_by')
     .leftJoin({ later: 'observations' }, 'later.amends_id', 'observations.id')
-    .select<ObservationWithPerson[]>('observations.*', 'people.display_name', 'people.initials', { amended_by_id: 'later.id' });
+    .select<ObservationWithPerson[]>('observations.*', 'people.display_name', 'people.initials', {
+      amended_by_id: 'later.id',
+    });
 }
 
 /** Who last changed a stay's identity or place, and when. */
-export async function stayVersionBy(db: Knex, stayId: string): Promise<{ by: string | null; at: string | null }> {
+export async function stayVersionBy(
+  db: Knex,
+  stayId: string,
+): Promise<{ by: string | null; at: string | null }> {
   const row = await withPeople(db)
     .where('observations.stay_id', stayId)
     .whereIn('observations.kind', ['details', 'place'])

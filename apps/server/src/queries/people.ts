@@ -24,7 +24,10 @@ export async function personByUsername(db: Knex, username: string): Promise<Pers
   return (await db<PersonRow>('people').where({ username: username.toLowerCase() }).first()) ?? null;
 }
 
-export async function peoplePage(db: Knex, { limit, after }: { limit: number; after: string | null }): Promise<PersonRow[]> {
+export async function peoplePage(
+  db: Knex,
+  { limit, after }: { limit: number; after: string | null },
+): Promise<PersonRow[]> {
   const query = db<PersonRow>('people').orderBy('username').limit(limit);
   return after === null ? query : query.where('username', '>', after);
 }
@@ -58,5 +61,6 @@ export async function grantsOf(db: Knex, personId: string): Promise<Grant[]> {
 
 export async function replaceGrants(db: Knex, personId: string, grants: readonly Grant[]): Promise<void> {
   await db<GrantRow>('grants').where({ person_id: personId }).delete();
-  for (const { role, unitId } of grants) await db<GrantRow>('grants').insert({ person_id: personId, role, unit_id: unitId });
+  for (const { role, unitId } of grants)
+    await db<GrantRow>('grants').insert({ person_id: personId, role, unit_id: unitId });
 }

@@ -2,7 +2,13 @@ import type { Knex } from 'knex';
 import type { Adapter, DatabaseSession, DatabaseUser } from 'lucia';
 
 export type SessionRow = { id: string; person_id: string; expires_at: string; ends_at: string };
-type PersonOfSession = { id: string; username: string; display_name: string; initials: string; disabled_at: string | null };
+type PersonOfSession = {
+  id: string;
+  username: string;
+  display_name: string;
+  initials: string;
+  disabled_at: string | null;
+};
 
 /** Lucia's sessions in our tables. A session is renewed by use, but never past the end that it was given at sign-in. */
 export function sessionAdapter(db: Knex): Adapter {
@@ -11,20 +17,30 @@ export function sessionAdapter(db: Knex): Adapter {
     async getSessionAndUser(sessionId) {
       const row = await sessions().where({ id: sessionId }).first();
       if (!row) return [null, null];
-      const person = await db<PersonOfSession>('people').where({ id: row.person_id }).whereNull('disabled_at').first();
+      const person = await db<PersonOfSession>('people')
+        .where({ id: row.person_id })
+        .whereNull('disabled_at')
+        .first();
       return person ? [toSession(row), toUser(person)] : [null, null];
     },
     async getUserSessions(personId) {
       return (await sessions().where({ person_id: personId })).map(toSession);
     },
     async setSession({ id, userId, expiresAt, attributes }) {
-      await sessions().insert({ id, person_id: userId, expires_at: expiresAt.toISOString(), ends_at: attributes.endsAt });
+      await sessions().insert({
+        id,
+        person_id: userId,
+        expires_at: expiresAt.toISOString(),
+        ends_at: attributes.endsAt,
+      });
     },
     async updateSessionExpiration(sessionId, expiresAt) {
       const row = await sessions().where({ id: sessionId }).first();
       if (!row) return;
       const wanted = expiresAt.toISOString();
-      await sessions().where({ id: sessionId }).update({ expires_at: wanted < row.ends_at ? wanted : row.ends_at });
+      await sessions()
+        .where({ id: sessionId })
+        .update({ expires_at: wanted < row.ends_at ? wanted : row.ends_at });
     },
     async deleteSession(sessionId) {
       await sessions().where({ id: sessionId }).delete();
@@ -43,7 +59,12 @@ export async function deleteSessionsOf(db: Knex, personId: string): Promise<void
 }
 
 function toSession(row: SessionRow): DatabaseSession {
-  return { id: row.id, userId: row.person_id, expiresAt: new Date(row.expires_at), attributes: { endsAt: row.ends_at } };
+  return {
+    id: row.id,
+    userId: row.person_id,
+    expiresAt: new Date(row.expires_at),
+    attributes: { endsAt: row.ends_at },
+  };
 }
 
 function toUser({ id, username, display_name, initials }: PersonOfSession): DatabaseUser {

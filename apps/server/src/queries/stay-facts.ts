@@ -1,6 +1,13 @@
-import { type Airway, type AirwayCheck, type Check, type Gas, HAPPENING_KINDS, type Happening } from '@windrow/ventilation/contract/observations';
-import type { StayDetails } from '@windrow/ventilation/contract/stays';
 import { CHECKS_WINDOW_MINUTES, type Stamped, type StayFacts } from '@windrow/ventilation/board/facts';
+import {
+  type Airway,
+  type AirwayCheck,
+  type Check,
+  type Gas,
+  HAPPENING_KINDS,
+  type Happening,
+} from '@windrow/ventilation/contract/observations';
+import type { StayDetails } from '@windrow/ventilation/contract/stays';
 import type { SupportId } from '@windrow/ventilation/support/catalogue';
 import type { Knex } from 'knex';
 import type { ObservationRow } from './observations.ts';
@@ -8,7 +15,9 @@ import type { ObservationRow } from './observations.ts';
 type FactRow = ObservationRow & { initials: string };
 
 /** Where a stay is, or how it ended: its 'place' facts. */
-export type Place = { event: 'admitted' | 'transferred'; bedId: string; unitId: string } | { event: 'left'; outcome: string };
+export type Place =
+  | { event: 'admitted' | 'transferred'; bedId: string; unitId: string }
+  | { event: 'left'; outcome: string };
 
 /** What a reader may know: everything, or only what was recorded by an instant (look back). */
 export type Known = { recordedBy?: string };
@@ -18,7 +27,8 @@ export type Known = { recordedBy?: string };
  * so that the cost does not grow with the stay.
  */
 export async function stayFacts(db: Knex, stayId: string, known: Known = {}): Promise<StayFacts | null> {
-  const kind = <Body>(name: ObservationRow['kind'], limit: number) => newest<Body>(db, { stayId, kind: name, limit, known });
+  const kind = <Body>(name: ObservationRow['kind'], limit: number) =>
+    newest<Body>(db, { stayId, kind: name, limit, known });
   const [details] = await kind<StayDetails>('details', 1);
   if (!details) return null;
   const [gas] = await kind<Gas>('gas', 1);
@@ -44,10 +54,13 @@ function holding(db: Knex, stayId: string, { recordedBy }: Known) {
     .where('observations.stay_id', stayId)
     .where((on) => on.whereNull('observations.amended_as').orWhere('observations.amended_as', 'corrected'))
     .whereNotExists((later) => {
-      later.from({ later: 'observations' }).select(db.raw('1')).whereRaw('later.amends_id = observations.id');
-      if (recordedBy !== undefined) later.where('later.recorded_at', '<=', recordedBy);
+      void later
+        .from({ later: 'observations' })
+        .select(db.raw('1'))
+        .whereRaw('later.amends_id = observations.id');
+      if (recordedBy !== undefined) void later.where('later.recorded_at', '<=', recordedBy);
     });
-  if (recordedBy !== undefined) query.where('observations.recorded_at', '<=', recordedBy);
+  if (recordedBy !== undefined) void query.where('observations.recorded_at', '<=', recordedBy);
   return query;
 }
 
@@ -55,14 +68,24 @@ function newestFirst(query: ReturnType<typeof holding>) {
   return query
     .join('people', 'people.id', 'observations.recorded_by')
     .select<FactRow[]>('observations.*', 'people.initials')
-    .orderBy([{ column: 'observations.observed_at', order: 'desc' }, { column: 'observations.sequence', order: 'desc' }]);
+    .orderBy([
+      { column: 'observations.observed_at', order: 'desc' },
+      { column: 'observations.sequence', order: 'desc' },
+    ]);
 }
 
 async function newest<Body>(
   db: Knex,
-  { stayId, kind, limit, known }: { stayId: string; kind: ObservationRow['kind']; limit: number; known: Known },
+  {
+    stayId,
+    kind,
+    limit,
+    known,
+  }: { stayId: string; kind: ObservationRow['kind']; limit: number; known: Known },
 ): Promise<Stamped<Body>[]> {
-  const rows: FactRow[] = await newestFirst(holding(db, stayId, known).where('observations.kind', kind)).limit(limit);
+  const rows: FactRow[] = await newestFirst(
+    holding(db, stayId, known).where('observations.kind', kind),
+  ).limit(limit);
   return rows.map((row) => stamped<Body>(row));
 }
 
@@ -72,14 +95,18 @@ async function recentChecks(db: Knex, stayId: string, known: Known): Promise<Sta
   if (!latest) return [];
   const from = new Date(Date.parse(latest.observedAt) - CHECKS_WINDOW_MINUTES * 60_000).toISOString();
   const rows: FactRow[] = await newestFirst(
-    holding(db, stayId, known).where('observations.kind', 'check').where('observations.observed_at', '>=', from),
+    holding(db, stayId, known)
+      .where('observations.kind', 'check')
+      .where('observations.observed_at', '>=', from),
   ).limit(200);
   return rows.map((row) => stamped<Check>(row));
 }
 
 /** The newest of each kind of happening, newest first. The kinds are few, and stand in the body. */
 async function latestHappenings(db: Knex, stayId: string, known: Known): Promise<Stamped<Happening>[]> {
-  const rows: FactRow[] = await newestFirst(holding(db, stayId, known).where('observations.kind', 'happening')).limit(200);
+  const rows: FactRow[] = await newestFirst(
+    holding(db, stayId, known).where('observations.kind', 'happening'),
+  ).limit(200);
   const latest = new Map<string, Stamped<Happening>>();
   for (const row of rows) {
     const fact = stamped<Happening>(row);
@@ -93,24 +120,34 @@ async function supportNow(db: Knex, stayId: string, known: Known): Promise<StayF
   const telling = () => holding(db, stayId, known).whereNotNull('observations.support');
   const [latest]: FactRow[] = await newestFirst(telling()).limit(1);
   if (!latest?.support) return null;
-  const [other]: FactRow[] = await newestFirst(telling().whereNot('observations.support', latest.support)).limit(1);
+  const [other]: FactRow[] = await newestFirst(
+    telling().whereNot('observations.support', latest.support),
+  ).limit(1);
   const since = await telling()
     .where('observations.support', latest.support)
     .where('observations.observed_at', other ? '>' : '>=', other?.observed_at ?? '')
     .min<{ since: string | null }[]>({ since: 'observations.observed_at' });
   // The catalogue's ids never change, so what was stored as one still is.
-  return { id: latest.support as SupportId, observedAt: latest.observed_at, sinceAt: since[0]?.since ?? latest.observed_at };
+  return {
+    id: latest.support as SupportId,
+    observedAt: latest.observed_at,
+    sinceAt: since[0]?.since ?? latest.observed_at,
+  };
 }
 
 async function admittedAt(db: Knex, stayId: string, known: Known): Promise<string> {
-  const row = await holding(db, stayId, known).where('observations.kind', 'place').min<{ at: string | null }[]>({ at: 'observations.observed_at' });
+  const row = await holding(db, stayId, known)
+    .where('observations.kind', 'place')
+    .min<{ at: string | null }[]>({ at: 'observations.observed_at' });
   return row[0]?.at ?? '';
 }
 
 /** Versions count the facts about identity and place, so a look back has the version of its time. */
 async function versionOf(db: Knex, stayId: string, { recordedBy }: Known): Promise<number> {
-  const query = db<ObservationRow>('observations').where({ stay_id: stayId }).whereIn('kind', ['details', 'place']);
-  if (recordedBy !== undefined) query.where('recorded_at', '<=', recordedBy);
+  const query = db<ObservationRow>('observations')
+    .where({ stay_id: stayId })
+    .whereIn('kind', ['details', 'place']);
+  if (recordedBy !== undefined) void query.where('recorded_at', '<=', recordedBy);
   const row = await query.count<{ n: number }[]>({ n: '*' });
   // Admission writes two facts, and is version 1.
   return Number(row[0]?.n ?? 2) - 1;

@@ -1,6 +1,17 @@
 import type { Knex } from 'knex';
 
-export type StayRow = { id: string; unit_id: string; bed_id: string | null; hospital_number: string; admitted_at: string; left_at: string | null; outcome: string | null; recorded_at: string; left_recorded_at: string | null; version: number };
+export type StayRow = {
+  id: string;
+  unit_id: string;
+  bed_id: string | null;
+  hospital_number: string;
+  admitted_at: string;
+  left_at: string | null;
+  outcome: string | null;
+  recorded_at: string;
+  left_recorded_at: string | null;
+  version: number;
+};
 
 export async function stayById(db: Knex, id: string): Promise<StayRow | null> {
   return (await db<StayRow>('stays').where({ id }).first()) ?? null;
@@ -11,7 +22,10 @@ export async function stayInBed(db: Knex, bedId: string): Promise<StayRow | null
 }
 
 export async function presentStayOfPatient(db: Knex, hospitalNumber: string): Promise<StayRow | null> {
-  return (await db<StayRow>('stays').where({ hospital_number: hospitalNumber }).whereNull('left_at').first()) ?? null;
+  return (
+    (await db<StayRow>('stays').where({ hospital_number: hospitalNumber }).whereNull('left_at').first()) ??
+    null
+  );
 }
 
 export async function insertStay(db: Knex, row: StayRow): Promise<void> {
@@ -19,7 +33,11 @@ export async function insertStay(db: Knex, row: StayRow): Promise<void> {
 }
 
 /** Changes where a stay is, or that it ended, and counts its version up. */
-export async function updateStay(db: Knex, id: string, change: Partial<Omit<StayRow, 'id' | 'version'>>): Promise<void> {
+export async function updateStay(
+  db: Knex,
+  id: string,
+  change: Partial<Omit<StayRow, 'id' | 'version'>>,
+): Promise<void> {
   await db<StayRow>('stays').where({ id }).update(change).increment('version', 1);
 }
 

@@ -1,7 +1,14 @@
 import type { Knex } from 'knex';
 
 export type UnitRow = { id: string; name: string; time_zone: string; revision: number };
-export type BedRow = { id: string; unit_id: string; label: string; row: number; column: number; is_open: number };
+export type BedRow = {
+  id: string;
+  unit_id: string;
+  label: string;
+  row: number;
+  column: number;
+  is_open: number;
+};
 
 export async function allUnits(db: Knex): Promise<UnitRow[]> {
   return db<UnitRow>('units').orderBy('name');
@@ -37,7 +44,10 @@ export async function bedsOfUnit(db: Knex, unitId: string): Promise<BedRow[]> {
 }
 
 export async function bedCounts(db: Knex): Promise<Map<string, number>> {
-  const rows = await db<BedRow>('beds').select('unit_id').count<{ unit_id: string; n: number }[]>({ n: '*' }).groupBy('unit_id');
+  const rows = await db<BedRow>('beds')
+    .select('unit_id')
+    .count<{ unit_id: string; n: number }[]>({ n: '*' })
+    .groupBy('unit_id');
   return new Map(rows.map(({ unit_id, n }) => [unit_id, n]));
 }
 
@@ -46,5 +56,7 @@ export async function insertBed(db: Knex, row: BedRow): Promise<void> {
 }
 
 export async function setBedOpen(db: Knex, id: string, isOpen: boolean): Promise<void> {
-  await db<BedRow>('beds').where({ id }).update({ is_open: Number(isOpen) });
+  await db<BedRow>('beds')
+    .where({ id })
+    .update({ is_open: Number(isOpen) });
 }

@@ -2,13 +2,31 @@ import type { VentilatorClass, VentilatorState } from '@windrow/ventilation/cont
 import type { Knex } from 'knex';
 
 export type VentilatorRow = {
-  id: string; asset_number: string; model: string; class: VentilatorClass; home_unit_id: string | null; state: VentilatorState;
-  unit_id: string | null; bed_id: string | null; place_words: string | null; since_at: string; version: number;
+  id: string;
+  asset_number: string;
+  model: string;
+  class: VentilatorClass;
+  home_unit_id: string | null;
+  state: VentilatorState;
+  unit_id: string | null;
+  bed_id: string | null;
+  place_words: string | null;
+  since_at: string;
+  version: number;
 };
 export type MoveRow = {
-  sequence: number; id: string; ventilator_id: string; from_state: VentilatorState; to_state: VentilatorState;
-  unit_id: string | null; bed_id: string | null; place_words: string | null; note: string | null;
-  observed_at: string; recorded_at: string; recorded_by: string;
+  sequence: number;
+  id: string;
+  ventilator_id: string;
+  from_state: VentilatorState;
+  to_state: VentilatorState;
+  unit_id: string | null;
+  bed_id: string | null;
+  place_words: string | null;
+  note: string | null;
+  observed_at: string;
+  recorded_at: string;
+  recorded_by: string;
 };
 
 export async function ventilatorById(db: Knex, id: string): Promise<VentilatorRow | null> {
@@ -40,26 +58,42 @@ export async function insertMove(db: Knex, row: Omit<MoveRow, 'sequence'>): Prom
   await db<MoveRow>('ventilator_moves').insert(row);
 }
 
-export async function movePage(db: Knex, { ventilatorId, limit, before }: { ventilatorId: string; limit: number; before: number | null }) {
+export async function movePage(
+  db: Knex,
+  { ventilatorId, limit, before }: { ventilatorId: string; limit: number; before: number | null },
+) {
   const query = db<MoveRow>('ventilator_moves')
     .join('people', 'people.id', 'ventilator_moves.recorded_by')
     .leftJoin('beds', 'beds.id', 'ventilator_moves.bed_id')
-    .select<(MoveRow & { display_name: string; bed_label: string | null })[]>('ventilator_moves.*', 'people.display_name', { bed_label: 'beds.label' })
+    .select<(MoveRow & { display_name: string; bed_label: string | null })[]>(
+      'ventilator_moves.*',
+      'people.display_name',
+      { bed_label: 'beds.label' },
+    )
     .where({ ventilator_id: ventilatorId })
     .orderBy('ventilator_moves.sequence', 'desc')
     .limit(limit);
   return before === null ? query : query.where('ventilator_moves.sequence', '<', before);
 }
 
-export async function countsByClassAndState(db: Knex): Promise<{ class: VentilatorClass; state: VentilatorState; n: number }[]> {
-  return db<VentilatorRow>('ventilators').select('class', 'state').count<{ class: VentilatorClass; state: VentilatorState; n: number }[]>({ n: '*' }).groupBy('class', 'state');
+export async function countsByClassAndState(
+  db: Knex,
+): Promise<{ class: VentilatorClass; state: VentilatorState; n: number }[]> {
+  return db<VentilatorRow>('ventilators')
+    .select('class', 'state')
+    .count<{ class: VentilatorClass; state: VentilatorState; n: number }[]>({ n: '*' })
+    .groupBy('class', 'state');
 }
 
 /** Machines ready in a unit: they stand there, or belong there and stand nowhere else. */
 export async function readyInUnit(db: Knex, unitId: string): Promise<number> {
   const row = await db<VentilatorRow>('ventilators')
     .where({ state: 'ready' })
-    .where((on) => on.where({ unit_id: unitId }).orWhere((home) => home.whereNull('unit_id').where({ home_unit_id: unitId })))
+    .where((on) =>
+      on
+        .where({ unit_id: unitId })
+        .orWhere((home) => home.whereNull('unit_id').where({ home_unit_id: unitId })),
+    )
     .count<{ n: number }[]>({ n: '*' });
   return Number(row[0]?.n ?? 0);
 }

@@ -1,6 +1,11 @@
 import type { Server as HttpServer } from 'node:http';
-import { type Audience, BEAT_EVERY_MS, type Beat, type ServerToClient } from '@windrow/ventilation/contract/live';
 import { bedForAudience } from '@windrow/ventilation/board/for-audience';
+import {
+  type Audience,
+  BEAT_EVERY_MS,
+  type Beat,
+  type ServerToClient,
+} from '@windrow/ventilation/contract/live';
 import { may } from '@windrow/ventilation/permissions/permissions';
 import { Server, type Socket } from 'socket.io';
 import type { Deps, Live, Tell } from '../deps.ts';
@@ -18,8 +23,18 @@ const HOUSE_ROOM = 'house';
 /** Signed in, but hearing no unit's beds (biomedical, administration): they still must know that the link lives. */
 const NO_UNIT_ROOM = 'no-unit';
 
-type Sockets = Server<Record<string, never>, ServerToClient, Record<string, never>, { person: SignedIn; cookie: string }>;
-type LiveSocket = Socket<Record<string, never>, ServerToClient, Record<string, never>, { person: SignedIn; cookie: string }>;
+type Sockets = Server<
+  Record<string, never>,
+  ServerToClient,
+  Record<string, never>,
+  { person: SignedIn; cookie: string }
+>;
+type LiveSocket = Socket<
+  Record<string, never>,
+  ServerToClient,
+  Record<string, never>,
+  { person: SignedIn; cookie: string }
+>;
 
 /**
  * Open screens. A connection is let in by its session's cookie and its origin; the server alone decides
@@ -36,15 +51,12 @@ export function openLiveLink(httpServer: HttpServer, deps: Deps): Live & { close
     allowRequest: (req, allow) => allow(null, isSameOrigin(req, deps.settings.origin)),
   });
 
-  io.use(async (socket, next) => {
+  io.use((socket, next) => {
     const cookie = socket.handshake.headers.cookie ?? '';
-    const { person } = await deps.signIns.whoIs(cookie);
-    if (!person) {
-      next(new Error('not signed in'));
-      return;
-    }
-    socket.data = { person, cookie };
-    next();
+    deps.signIns.whoIs(cookie).then(({ person }) => {
+      if (person) socket.data = { person, cookie };
+      next(person ? undefined : new Error('not signed in'));
+    }, next);
   });
   io.on('connection', (socket) => {
     welcome(deps, socket).catch((error: unknown) => {
@@ -53,9 +65,18 @@ export function openLiveLink(httpServer: HttpServer, deps: Deps): Live & { close
     });
   });
 
-  const beats = setInterval(() => void beat(deps, io).catch((error: unknown) => deps.log.error({ err: error }, 'a beat failed')), BEAT_EVERY_MS);
+  const beats = setInterval(
+    () => void beat(deps, io).catch((error: unknown) => deps.log.error({ err: error }, 'a beat failed')),
+    BEAT_EVERY_MS,
+  );
   beats.unref();
-  const checks = setInterval(() => void dropEnded(deps, io).catch((error: unknown) => deps.log.error({ err: error }, 'a session check failed')), BEAT_EVERY_MS * SESSION_CHECK_EVERY_BEATS);
+  const checks = setInterval(
+    () =>
+      void dropEnded(deps, io).catch((error: unknown) =>
+        deps.log.error({ err: error }, 'a session check failed'),
+      ),
+    BEAT_EVERY_MS * SESSION_CHECK_EVERY_BEATS,
+  );
   checks.unref();
 
   return {
@@ -94,9 +115,17 @@ function audienceOf(person: SignedIn, unitId: string, asked: unknown): Audience 
 /** One beat a unit, with its revision, so that a screen that missed a change notices; one for those who hear no unit. */
 async function beatsNow({ db, now, version }: Deps): Promise<Beat[]> {
   const serverTime = now().toISOString();
-  const beats: Beat[] = [{ serverTime, version, unitId: null, revision: await houseRevision(db), ventilatorsReady: 0 }];
+  const beats: Beat[] = [
+    { serverTime, version, unitId: null, revision: await houseRevision(db), ventilatorsReady: 0 },
+  ];
   for (const unit of await allUnits(db)) {
-    beats.push({ serverTime, version, unitId: unit.id, revision: unit.revision, ventilatorsReady: await readyInUnit(db, unit.id) });
+    beats.push({
+      serverTime,
+      version,
+      unitId: unit.id,
+      revision: unit.revision,
+      ventilatorsReady: await readyInUnit(db, unit.id),
+    });
   }
   return beats;
 }
@@ -113,11 +142,18 @@ function tellRooms({ now }: Deps, io: Sockets, { beds, changed, dropped }: Tell)
   const at = now().toISOString();
   for (const { revision, unitId, bed } of beds) {
     for (const audience of ['staff', 'display'] as const) {
-      io.to(unitRoom(unitId, audience)).emit('bed', { revision, unitId, bed: bedForAudience({ bed, audience, now: at }) });
+      io.to(unitRoom(unitId, audience)).emit('bed', {
+        revision,
+        unitId,
+        bed: bedForAudience({ bed, audience, now: at }),
+      });
     }
   }
   for (const event of changed) {
-    const rooms = event.topic === 'fleet' || event.topic === 'units' || event.unitId === null ? [HOUSE_ROOM] : [unitRoom(event.unitId, 'staff'), unitRoom(event.unitId, 'display')];
+    const rooms =
+      event.topic === 'fleet' || event.topic === 'units' || event.unitId === null
+        ? [HOUSE_ROOM]
+        : [unitRoom(event.unitId, 'staff'), unitRoom(event.unitId, 'display')];
     io.to(rooms).emit('changed', event);
   }
   for (const personId of dropped) io.in(personRoom(personId)).disconnectSockets(true);

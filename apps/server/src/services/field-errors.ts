@@ -5,7 +5,10 @@ export function fieldErrors(error: z.ZodError, under = ''): { path: string; mess
   return error.issues.flatMap((issue) => {
     const path = [under, ...issue.path.map(String)].filter(Boolean).join('.');
     if (issue.code === 'unrecognized_keys') {
-      return issue.keys.map((key) => ({ path: path ? `${path}.${key}` : key, message: 'is not a field here' }));
+      return issue.keys.map((key) => ({
+        path: path ? `${path}.${key}` : key,
+        message: 'is not a field here',
+      }));
     }
     return [{ path, message: issue.message }];
   });

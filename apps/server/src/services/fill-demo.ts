@@ -37,7 +37,9 @@ export async function fillDemo({ db, signIns, now }: Deps): Promise<void> {
     const filling: Filling = {
       trx,
       ago: (minutes) => new Date(filledAt.getTime() - minutes * 60_000).toISOString(),
-      unitIds: new Map(), bedIds: new Map(), personIds: new Map(),
+      unitIds: new Map(),
+      bedIds: new Map(),
+      personIds: new Map(),
     };
     await fillUnits(filling, hospital);
     await fillPeople(filling, hospital, passwordHash);
@@ -53,7 +55,14 @@ async function fillUnits({ trx, ago, unitIds, bedIds }: Filling, { units }: Demo
     const unitId = randomUUID();
     unitIds.set(key, unitId);
     await insertUnit(trx, { id: unitId, name, time_zone: timeZone, revision: 0 });
-    await insertPolicy(trx, { unitId, version: 1, policy: DEFAULT_POLICY, reason: 'default policy', changedBy: null, changedAt: ago(60 * 24 * 90) });
+    await insertPolicy(trx, {
+      unitId,
+      version: 1,
+      policy: DEFAULT_POLICY,
+      reason: 'default policy',
+      changedBy: null,
+      changedAt: ago(60 * 24 * 90),
+    });
     for (const { label, row, column, isOpen } of beds) {
       const bedId = randomUUID();
       bedIds.set(bedKey(key, label), bedId);
@@ -62,12 +71,31 @@ async function fillUnits({ trx, ago, unitIds, bedIds }: Filling, { units }: Demo
   }
 }
 
-async function fillPeople({ trx, unitIds, personIds }: Filling, { people }: DemoHospital, passwordHash: string): Promise<void> {
+async function fillPeople(
+  { trx, unitIds, personIds }: Filling,
+  { people }: DemoHospital,
+  passwordHash: string,
+): Promise<void> {
   for (const { username, displayName, initials, grants } of people) {
     const id = randomUUID();
     personIds.set(username, id);
-    await insertPerson(trx, { id, username, display_name: displayName, initials, password_hash: passwordHash, disabled_at: null, version: 1 });
-    await replaceGrants(trx, id, grants.map(({ role, unitKey }) => ({ role, unitId: unitKey === null ? null : known(unitIds, unitKey) })));
+    await insertPerson(trx, {
+      id,
+      username,
+      display_name: displayName,
+      initials,
+      password_hash: passwordHash,
+      disabled_at: null,
+      version: 1,
+    });
+    await replaceGrants(
+      trx,
+      id,
+      grants.map(({ role, unitKey }) => ({
+        role,
+        unitId: unitKey === null ? null : known(unitIds, unitKey),
+      })),
+    );
   }
 }
 
@@ -80,22 +108,51 @@ async function fillStay(filling: Filling, stay: DemoStay): Promise<void> {
   const leftAt = stay.leftMinutesAgo === null ? null : ago(stay.leftMinutesAgo);
   const first = stay.facts[0]?.by ?? 'charge';
   await insertStay(trx, {
-    id: stayId, unit_id: unitId, bed_id: leftAt === null ? bedId : null, hospital_number: stay.details.patient.hospitalNumber,
-    admitted_at: admittedAt, left_at: leftAt, outcome: stay.outcome, recorded_at: admittedAt, left_recorded_at: leftAt, version: leftAt === null ? 1 : 2,
+    id: stayId,
+    unit_id: unitId,
+    bed_id: leftAt === null ? bedId : null,
+    hospital_number: stay.details.patient.hospitalNumber,
+    admitted_at: admittedAt,
+    left_at: leftAt,
+    outcome: stay.outcome,
+    recorded_at: admittedAt,
+    left_recorded_at: leftAt,
+    version: leftAt === null ? 1 : 2,
   });
-  const append = (kind: Parameters<typeof insertObservation>[1]['kind'], body: object, observedAt: string, recordedAt: string, by: string) =>
+  const append = (
+    kind: Parameters<typeof insertObservation>[1]['kind'],
+    body: object,
+    observedAt: string,
+    recordedAt: string,
+    by: string,
+  ) =>
     insertObservation(trx, {
-      id: randomUUID(), stay_id: stayId, unit_id: unitId, kind, observed_at: observedAt, recorded_at: recordedAt,
-      recorded_by: known(personIds, by), source: 'hand', support: supportOf(body), amends_id: null, amended_as: null, reason: null, body: JSON.stringify(body),
+      id: randomUUID(),
+      stay_id: stayId,
+      unit_id: unitId,
+      kind,
+      observed_at: observedAt,
+      recorded_at: recordedAt,
+      recorded_by: known(personIds, by),
+      source: 'hand',
+      support: supportOf(body),
+      amends_id: null,
+      amended_as: null,
+      reason: null,
+      body: JSON.stringify(body),
     });
   await append('details', stay.details, admittedAt, admittedAt, first);
   await append('place', { event: 'admitted', bedId, unitId }, admittedAt, admittedAt, first);
   for (const fact of stay.facts) {
     // Through the schema of the route, so that nothing stands in the demo that a person could not have entered.
-    const { observedAt, ...body } = RECORDED_KINDS[fact.kind].schema.parse({ ...fact.body, observedAt: ago(fact.minutesAgo) });
+    const { observedAt, ...body } = RECORDED_KINDS[fact.kind].schema.parse({
+      ...fact.body,
+      observedAt: ago(fact.minutesAgo),
+    });
     await append(fact.kind, body, observedAt, ago(fact.recordedMinutesAgo), fact.by);
   }
-  if (leftAt !== null) await append('place', { event: 'left', outcome: stay.outcome ?? 'ward' }, leftAt, leftAt, first);
+  if (leftAt !== null)
+    await append('place', { event: 'left', outcome: stay.outcome ?? 'ward' }, leftAt, leftAt, first);
 }
 
 function supportOf(body: object): string | null {
@@ -103,36 +160,81 @@ function supportOf(body: object): string | null {
   return 'toSupport' in body && typeof body.toSupport === 'string' ? body.toSupport : null;
 }
 
-async function fillVentilators({ trx, ago, unitIds, bedIds, personIds }: Filling, { ventilators }: DemoHospital): Promise<void> {
+async function fillVentilators(
+  { trx, ago, unitIds, bedIds, personIds }: Filling,
+  { ventilators }: DemoHospital,
+): Promise<void> {
   for (const machine of ventilators) {
     const id = randomUUID();
     const homeUnitId = machine.homeUnitKey === null ? null : known(unitIds, machine.homeUnitKey);
-    const unitId = machine.bed ? known(unitIds, machine.bed.unitKey) : machine.state === 'on-loan' ? null : homeUnitId;
+    const unitId = machine.bed
+      ? known(unitIds, machine.bed.unitKey)
+      : machine.state === 'on-loan'
+        ? null
+        : homeUnitId;
     const bedId = machine.bed ? known(bedIds, bedKey(machine.bed.unitKey, machine.bed.bedLabel)) : null;
     const since = ago(machine.sinceMinutesAgo);
     await insertVentilator(trx, {
-      id, asset_number: machine.assetNumber, model: machine.model, class: machine.class, home_unit_id: homeUnitId,
-      state: machine.state, unit_id: unitId, bed_id: bedId, place_words: machine.words, since_at: since, version: 1,
+      id,
+      asset_number: machine.assetNumber,
+      model: machine.model,
+      class: machine.class,
+      home_unit_id: homeUnitId,
+      state: machine.state,
+      unit_id: unitId,
+      bed_id: bedId,
+      place_words: machine.words,
+      since_at: since,
+      version: 1,
     });
     await insertMove(trx, {
-      id: randomUUID(), ventilator_id: id, from_state: machine.state === 'ready' ? 'cleaning' : 'ready', to_state: machine.state,
-      unit_id: unitId, bed_id: bedId, place_words: machine.words, note: null, observed_at: since, recorded_at: since, recorded_by: known(personIds, 'biomed'),
+      id: randomUUID(),
+      ventilator_id: id,
+      from_state: machine.state === 'ready' ? 'cleaning' : 'ready',
+      to_state: machine.state,
+      unit_id: unitId,
+      bed_id: bedId,
+      place_words: machine.words,
+      note: null,
+      observed_at: since,
+      recorded_at: since,
+      recorded_by: known(personIds, 'biomed'),
     });
   }
 }
 
-async function fillShifts({ trx, ago, unitIds, bedIds, personIds }: Filling, { shifts }: DemoHospital): Promise<void> {
+async function fillShifts(
+  { trx, ago, unitIds, bedIds, personIds }: Filling,
+  { shifts }: DemoHospital,
+): Promise<void> {
   for (const shift of shifts) {
     const id = randomUUID();
     await insertShift(
       trx,
-      { id, unit_id: known(unitIds, shift.unitKey), name: shift.name, starts_at: ago(-shift.startsMinutesFromNow), ends_at: ago(-shift.endsMinutesFromNow), made_by: known(personIds, 'charge') },
-      shift.people.map(({ username, minutesAvailable }) => ({ personId: known(personIds, username), minutesAvailable })),
+      {
+        id,
+        unit_id: known(unitIds, shift.unitKey),
+        name: shift.name,
+        starts_at: ago(-shift.startsMinutesFromNow),
+        ends_at: ago(-shift.endsMinutesFromNow),
+        made_by: known(personIds, 'charge'),
+      },
+      shift.people.map(({ username, minutesAvailable }) => ({
+        personId: known(personIds, username),
+        minutesAvailable,
+      })),
     );
     if (!shift.published && shift.places.length === 0) continue;
     await insertAssignment(trx, {
-      shiftId: id, version: 1, published: shift.published, changedBy: known(personIds, 'charge'), changedAt: ago(Math.max(0, -shift.startsMinutesFromNow)),
-      places: shift.places.map(({ bedLabel, username }) => ({ bedId: known(bedIds, bedKey(shift.unitKey, bedLabel)), personId: known(personIds, username) })),
+      shiftId: id,
+      version: 1,
+      published: shift.published,
+      changedBy: known(personIds, 'charge'),
+      changedAt: ago(Math.max(0, -shift.startsMinutesFromNow)),
+      places: shift.places.map(({ bedLabel, username }) => ({
+        bedId: known(bedIds, bedKey(shift.unitKey, bedLabel)),
+        personId: known(personIds, username),
+      })),
     });
   }
 }

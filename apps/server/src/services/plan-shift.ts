@@ -3,22 +3,42 @@ import type { Assignment, AssignmentInput, NewShift, Shift } from '@windrow/vent
 import type { Knex } from 'knex';
 import { conflict, invalid, notFound, staleVersion } from '../errors.ts';
 import { colleaguesOfUnit, personById } from '../queries/people.ts';
-import { insertAssignment, insertShift, latestAssignment, shiftById, shiftPeople, shiftsNotEnded, type ShiftRow } from '../queries/shifts.ts';
+import {
+  insertAssignment,
+  insertShift,
+  latestAssignment,
+  type ShiftRow,
+  shiftById,
+  shiftPeople,
+  shiftsNotEnded,
+} from '../queries/shifts.ts';
 import { bedsOfUnit } from '../queries/units.ts';
 import type { Write } from './write.ts';
 
 /** A span of duty in a unit with the people on it; nobody has a bed yet. */
-export async function makeShift(write: Write, { unitId, shift }: { unitId: string; shift: NewShift }): Promise<Shift> {
+export async function makeShift(
+  write: Write,
+  { unitId, shift }: { unitId: string; shift: NewShift },
+): Promise<Shift> {
   const colleagues = new Set((await colleaguesOfUnit(write.trx, unitId)).map(({ id }) => id));
   const strangers = shift.people.flatMap(({ personId }, index) =>
-    colleagues.has(personId) ? [] : [{ path: `people.${index}.personId`, message: 'is not a therapist of this unit' }],
+    colleagues.has(personId)
+      ? []
+      : [{ path: `people.${index}.personId`, message: 'is not a therapist of this unit' }],
   );
   if (strangers.length > 0) throw invalid(strangers);
   await requireNoOverlap(write.trx, unitId, shift);
   const id = randomUUID();
   await insertShift(
     write.trx,
-    { id, unit_id: unitId, name: shift.name, starts_at: shift.startsAt, ends_at: shift.endsAt, made_by: write.person.personId },
+    {
+      id,
+      unit_id: unitId,
+      name: shift.name,
+      starts_at: shift.startsAt,
+      ends_at: shift.endsAt,
+      made_by: write.person.personId,
+    },
     shift.people,
   );
   write.changed({ topic: 'shifts', unitId });
@@ -38,26 +58,44 @@ export async function putAssignment(
   const current = latest?.version ?? 0;
   if (version !== current) {
     const by = latest?.changedBy ? await personById(write.trx, latest.changedBy) : null;
-    throw staleVersion({ thing: 'assignment', given: version, current, by: by?.display_name ?? null, at: latest?.changedAt ?? null });
+    throw staleVersion({
+      thing: 'assignment',
+      given: version,
+      current,
+      by: by?.display_name ?? null,
+      at: latest?.changedAt ?? null,
+    });
   }
   await requireKnownPlaces(write.trx, shift, input);
   const before = await latestAssignment(write.trx, shift.id, { publishedOnly: true });
   await insertAssignment(write.trx, {
-    shiftId: shift.id, version: current + 1, published: input.publish, places: input.places,
-    changedBy: write.person.personId, changedAt: write.now,
+    shiftId: shift.id,
+    version: current + 1,
+    published: input.publish,
+    places: input.places,
+    changedBy: write.person.personId,
+    changedAt: write.now,
   });
   if (input.publish && shift.ends_at > write.now) {
     for (const bedId of touchedBeds(before?.places ?? [], input.places)) await write.bedChanged(bedId);
   }
   write.changed({ topic: 'shifts', unitId: shift.unit_id });
-  await write.audit({ act: input.publish ? 'publish assignment' : 'save assignment', unitId: shift.unit_id, subject: shift.id });
+  await write.audit({
+    act: input.publish ? 'publish assignment' : 'save assignment',
+    unitId: shift.unit_id,
+    subject: shift.id,
+  });
   return readAssignment(write.trx, shift);
 }
 
 function touchedBeds(before: AssignmentInput['places'], after: AssignmentInput['places']): string[] {
-  const key = (place: AssignmentInput['places'][number]) => `${place.bedId} ${place.personId} ${place.coverPersonId ?? ''}`;
+  const key = (place: AssignmentInput['places'][number]) =>
+    `${place.bedId} ${place.personId} ${place.coverPersonId ?? ''}`;
   const [old, fresh] = [new Set(before.map(key)), new Set(after.map(key))];
-  const touched = [...before.filter((place) => !fresh.has(key(place))), ...after.filter((place) => !old.has(key(place)))];
+  const touched = [
+    ...before.filter((place) => !fresh.has(key(place))),
+    ...after.filter((place) => !old.has(key(place))),
+  ];
   return [...new Set(touched.map(({ bedId }) => bedId))];
 }
 
@@ -67,7 +105,9 @@ async function requireKnownPlaces(db: Knex, shift: ShiftRow, { places }: Assignm
   const errors = places.flatMap(({ bedId, personId, coverPersonId }, index) => [
     ...(beds.has(bedId) ? [] : [{ path: `places.${index}.bedId`, message: 'is not a bed of this unit' }]),
     ...(people.has(personId) ? [] : [{ path: `places.${index}.personId`, message: 'is not on this shift' }]),
-    ...(coverPersonId == null || people.has(coverPersonId) ? [] : [{ path: `places.${index}.coverPersonId`, message: 'is not on this shift' }]),
+    ...(coverPersonId == null || people.has(coverPersonId)
+      ? []
+      : [{ path: `places.${index}.coverPersonId`, message: 'is not on this shift' }]),
   ]);
   if (errors.length > 0) throw invalid(errors);
 }
@@ -91,11 +131,18 @@ export async function readShift(db: Knex, row: ShiftRow): Promise<Shift> {
   const latest = await latestAssignment(db, row.id);
   const published = await latestAssignment(db, row.id, { publishedOnly: true });
   return {
-    shiftId: row.id, unitId: row.unit_id, name: row.name, startsAt: row.starts_at, endsAt: row.ends_at,
+    shiftId: row.id,
+    unitId: row.unit_id,
+    name: row.name,
+    startsAt: row.starts_at,
+    endsAt: row.ends_at,
     version: latest?.version ?? 0,
     publishedVersion: published?.version ?? null,
     people: people.map((person) => ({
-      personId: person.person_id, displayName: person.display_name, initials: person.initials, minutesAvailable: person.minutes_available,
+      personId: person.person_id,
+      displayName: person.display_name,
+      initials: person.initials,
+      minutesAvailable: person.minutes_available,
     })),
   };
 }
@@ -108,9 +155,17 @@ export async function requireShift(db: Knex, id: string): Promise<ShiftRow> {
 
 /** Two shifts of one unit at one time would give a bed two therapists. */
 async function requireNoOverlap(db: Knex, unitId: string, shift: NewShift): Promise<void> {
-  const other = (await shiftsNotEnded(db, unitId, shift.startsAt)).find((one) => one.starts_at < shift.endsAt);
+  const other = (await shiftsNotEnded(db, unitId, shift.startsAt)).find(
+    (one) => one.starts_at < shift.endsAt,
+  );
   if (!other) return;
-  throw conflict(`${other.name} runs in this unit from ${other.starts_at} to ${other.ends_at}; shifts of a unit do not overlap.`, [
-    { path: 'startsAt', message: `must be at or after ${other.ends_at}, or the shift must end by ${other.starts_at}` },
-  ]);
+  throw conflict(
+    `${other.name} runs in this unit from ${other.starts_at} to ${other.ends_at}; shifts of a unit do not overlap.`,
+    [
+      {
+        path: 'startsAt',
+        message: `must be at or after ${other.ends_at}, or the shift must end by ${other.starts_at}`,
+      },
+    ],
+  );
 }

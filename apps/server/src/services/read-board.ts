@@ -14,7 +14,10 @@ import { readyInUnit } from '../queries/ventilators.ts';
 import { publishedAssignments, toPlace } from './rebuild-bed.ts';
 
 /** Every bed of a unit as it stands, cut to what the reader may see. */
-export async function readBoard(deps: Deps, { unit, audience }: { unit: UnitRow; audience: Audience }): Promise<Board> {
+export async function readBoard(
+  deps: Deps,
+  { unit, audience }: { unit: UnitRow; audience: Audience },
+): Promise<Board> {
   const now = deps.now().toISOString();
   const beds = await boardRows(deps.db, unit.id);
   return {
@@ -30,9 +33,13 @@ export async function readBoard(deps: Deps, { unit, audience }: { unit: UnitRow;
  * What the board showed at a past minute: from the facts recorded by then, under the policy of then,
  * aged to then. What was entered later, even about earlier, is not in it.
  */
-export async function lookBack(deps: Deps, { unit, audience, at }: { unit: UnitRow; audience: Audience; at: string }): Promise<Board> {
+export async function lookBack(
+  deps: Deps,
+  { unit, audience, at }: { unit: UnitRow; audience: Audience; at: string },
+): Promise<Board> {
   const serverTime = deps.now().toISOString();
-  if (at > serverTime) throw invalid([{ path: 'at', message: `must not be after the server's time, ${serverTime}, not ${at}` }]);
+  if (at > serverTime)
+    throw invalid([{ path: 'at', message: `must not be after the server's time, ${serverTime}, not ${at}` }]);
   const beds = await bedsKnownAt(deps.db, { unitId: unit.id, at });
   return {
     ...(await boardHead(deps, unit)),
@@ -68,12 +75,27 @@ export async function bedsKnownAt(db: Knex, { unitId, at }: { unitId: string; at
   return beds;
 }
 
-async function boardHead({ db, settings }: Deps, unit: UnitRow): Promise<Pick<Board, 'unit' | 'demonstration' | 'fleet'>> {
-  return { unit: await toUnit(db, unit), demonstration: settings.demo, fleet: { ready: await readyInUnit(db, unit.id) } };
+async function boardHead(
+  { db, settings }: Deps,
+  unit: UnitRow,
+): Promise<Pick<Board, 'unit' | 'demonstration' | 'fleet'>> {
+  return {
+    unit: await toUnit(db, unit),
+    demonstration: settings.demo,
+    fleet: { ready: await readyInUnit(db, unit.id) },
+  };
 }
 
 export async function toUnit(db: Knex, { id, name, time_zone, revision }: UnitRow): Promise<Unit> {
   const { policy } = await policyOf(db, id);
   const counts = await bedCounts(db);
-  return { unitId: id, name, timeZone: time_zone, revision, nightFrom: policy.nightFrom, nightTo: policy.nightTo, bedCount: counts.get(id) ?? 0 };
+  return {
+    unitId: id,
+    name,
+    timeZone: time_zone,
+    revision,
+    nightFrom: policy.nightFrom,
+    nightTo: policy.nightTo,
+    bedCount: counts.get(id) ?? 0,
+  };
 }

@@ -12,40 +12,81 @@ export async function readCapacity({ db, now }: Deps): Promise<Capacity> {
   const serverTime = now().toISOString();
   const units: Capacity['units'] = [];
   for (const unit of await allUnits(db)) {
-    units.push(unitCounts({ unit, beds: await boardRows(db, unit.id), serverTime, ventilatorsReady: await readyInUnit(db, unit.id) }));
+    units.push(
+      unitCounts({
+        unit,
+        beds: await boardRows(db, unit.id),
+        serverTime,
+        ventilatorsReady: await readyInUnit(db, unit.id),
+      }),
+    );
   }
   return { serverTime, classes: classCounts(await countsByClassAndState(db)), units };
 }
 
 function classCounts(rows: Awaited<ReturnType<typeof countsByClassAndState>>): Capacity['classes'] {
   return Object.entries(VENTILATOR_CLASSES).map(([name, label]) => {
-    const count = (state: string) => Number(rows.find((row) => row.class === name && row.state === state)?.n ?? 0);
+    const count = (state: string) =>
+      Number(rows.find((row) => row.class === name && row.state === state)?.n ?? 0);
     return {
       class: name as VentilatorClass,
       label,
-      counts: { inUse: count('in-use'), ready: count('ready'), cleaning: count('cleaning'), held: count('held'), onLoan: count('on-loan') },
+      counts: {
+        inUse: count('in-use'),
+        ready: count('ready'),
+        cleaning: count('cleaning'),
+        held: count('held'),
+        onLoan: count('on-loan'),
+      },
     };
   });
 }
 
-function unitCounts({ unit, beds, serverTime, ventilatorsReady }: { unit: UnitRow; beds: Bed[]; serverTime: string; ventilatorsReady: number }): Capacity['units'][number] {
+function unitCounts({
+  unit,
+  beds,
+  serverTime,
+  ventilatorsReady,
+}: {
+  unit: UnitRow;
+  beds: Bed[];
+  serverTime: string;
+  ventilatorsReady: number;
+}): Capacity['units'][number] {
   const occupied = beds.filter((bed) => bed.stay !== null);
   const shown = occupied.map((bed) => shownBed({ bed, now: serverTime }));
-  const onSupport = (test: (id: SupportId) => boolean) => occupied.filter((bed) => bed.stay?.support && test(bed.stay.support.id)).length;
+  const onSupport = (test: (id: SupportId) => boolean) =>
+    occupied.filter((bed) => bed.stay?.support && test(bed.stay.support.id)).length;
   const ofKind = (kind: string) => onSupport((id) => supportEntry(id).kind === kind);
   const open = beds.filter((bed) => bed.isOpen).length;
   return {
     unitId: unit.id,
     name: unit.name,
-    beds: { open, closed: beds.length - open, occupied: occupied.length, free: beds.filter((bed) => bed.isOpen && !bed.stay).length },
+    beds: {
+      open,
+      closed: beds.length - open,
+      occupied: occupied.length,
+      free: beds.filter((bed) => bed.isOpen && !bed.stay).length,
+    },
     support: {
-      invasive: ofKind('invasive'), mask: ofKind('mask'), highFlow: ofKind('high-flow'),
-      other: ofKind('oxygen') + ofKind('none'), unknown: occupied.filter((bed) => !bed.stay?.support).length,
+      invasive: ofKind('invasive'),
+      mask: ofKind('mask'),
+      highFlow: ofKind('high-flow'),
+      other: ofKind('oxygen') + ofKind('none'),
+      unknown: occupied.filter((bed) => !bed.stay?.support).length,
     },
     unassigned: shown.filter(({ assignment }) => assignment === null).length,
-    checksOverdue: shown.filter(({ groups }) => groups.check.state === 'overdue' || groups.check.state === 'withdrawn').length,
+    checksOverdue: shown.filter(
+      ({ groups }) => groups.check.state === 'overdue' || groups.check.state === 'withdrawn',
+    ).length,
     ventilatorsReady,
-    withoutMachine: occupied.filter((bed) => bed.stay?.support && isOnVentilator(bed.stay.support.id) && !bed.ventilator).length,
-    oldestCheckAt: shown.map(({ groups }) => groups.check.observedAt).filter((at) => at !== null).sort()[0] ?? null,
+    withoutMachine: occupied.filter(
+      (bed) => bed.stay?.support && isOnVentilator(bed.stay.support.id) && !bed.ventilator,
+    ).length,
+    oldestCheckAt:
+      shown
+        .map(({ groups }) => groups.check.observedAt)
+        .filter((at) => at !== null)
+        .sort()[0] ?? null,
   };
 }

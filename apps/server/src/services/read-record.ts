@@ -1,11 +1,18 @@
 import { RecordEntry } from '@windrow/ventilation/contract/observations';
 import type { Knex } from 'knex';
 import { invalid } from '../errors.ts';
-import { recordPage, type ObservationWithPerson } from '../queries/observations.ts';
+import { type ObservationWithPerson, recordPage } from '../queries/observations.ts';
 
 /** A stay's whole record, newest first, with what was amended still to be read. */
-export async function readRecord(db: Knex, { stayId, limit, cursor }: { stayId: string; limit: number; cursor: string | null }) {
-  const rows = await recordPage(db, { stayId, limit: limit + 1, before: cursor === null ? null : readCursor(cursor) });
+export async function readRecord(
+  db: Knex,
+  { stayId, limit, cursor }: { stayId: string; limit: number; cursor: string | null },
+) {
+  const rows = await recordPage(db, {
+    stayId,
+    limit: limit + 1,
+    before: cursor === null ? null : readCursor(cursor),
+  });
   const page = rows.slice(0, limit);
   const last = page.at(-1);
   return {
@@ -30,7 +37,10 @@ function toRecordEntry(row: ObservationWithPerson): RecordEntry {
     recordedAt: row.recorded_at,
     recordedBy: { personId: row.recorded_by, displayName: row.display_name, initials: row.initials },
     source: row.source,
-    amends: row.amends_id && row.amended_as ? { observationId: row.amends_id, reason: row.reason ?? '', as: row.amended_as } : null,
+    amends:
+      row.amends_id && row.amended_as
+        ? { observationId: row.amends_id, reason: row.reason ?? '', as: row.amended_as }
+        : null,
     amendedBy: row.amended_by_id,
     body: RecordEntry.shape.body.parse(JSON.parse(row.body)),
   };

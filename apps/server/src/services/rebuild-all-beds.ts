@@ -6,7 +6,10 @@ import { allUnits, bedsOfUnit } from '../queries/units.ts';
 import { bedFromFacts, rebuildBed } from './rebuild-bed.ts';
 
 /** Compares every stored row with what the facts give, and stores anew those that differ. */
-export async function rebuildAllBeds(db: Knex, { now }: { now: string }): Promise<{ beds: number; differed: string[] }> {
+export async function rebuildAllBeds(
+  db: Knex,
+  { now }: { now: string },
+): Promise<{ beds: number; differed: string[] }> {
   return db.transaction(async (trx) => {
     let beds = 0;
     const differed: string[] = [];
@@ -15,7 +18,8 @@ export async function rebuildAllBeds(db: Knex, { now }: { now: string }): Promis
         beds += 1;
         const stored = await boardRow(trx, row.id);
         const fresh = await bedFromFacts(trx, { row, revision: stored?.revision ?? 0, now });
-        if (stored && isDeepStrictEqual(withoutEnded(stored, now), JSON.parse(JSON.stringify(fresh)))) continue;
+        if (stored && isDeepStrictEqual(withoutEnded(stored, now), JSON.parse(JSON.stringify(fresh))))
+          continue;
         differed.push(`${unit.name} ${row.label}`);
         await rebuildBed(trx, { bedId: row.id, now });
       }

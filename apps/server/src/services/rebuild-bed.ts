@@ -1,4 +1,4 @@
-import { bedBoard, type BedPlace } from '@windrow/ventilation/board/bed-board';
+import { type BedPlace, bedBoard } from '@windrow/ventilation/board/bed-board';
 import type { Bed, BedAssignment } from '@windrow/ventilation/contract/board';
 import type { Knex } from 'knex';
 import { putBoardRow } from '../queries/board-rows.ts';
@@ -19,7 +19,10 @@ export async function rebuildBed(trx: Knex, { bedId, now }: { bedId: string; now
 }
 
 /** The same row without storing it: what the rebuild command and the tests compare with what is stored. */
-export async function bedFromFacts(db: Knex, { row, revision, now }: { row: BedRow; revision: number; now: string }): Promise<Bed> {
+export async function bedFromFacts(
+  db: Knex,
+  { row, revision, now }: { row: BedRow; revision: number; now: string },
+): Promise<Bed> {
   const stay = await stayInBed(db, row.id);
   const machine = await ventilatorAtBed(db, row.id);
   const { policy } = await policyOf(db, row.unit_id);
@@ -29,30 +32,51 @@ export async function bedFromFacts(db: Knex, { row, revision, now }: { row: BedR
     facts: stay ? await stayFacts(db, stay.id) : null,
     policy,
     assignments: await publishedAssignments(db, { unitId: row.unit_id, bedId: row.id, notEndedAt: now }),
-    ventilator: machine ? { ventilatorId: machine.id, assetNumber: machine.asset_number, model: machine.model } : null,
+    ventilator: machine
+      ? { ventilatorId: machine.id, assetNumber: machine.asset_number, model: machine.model }
+      : null,
   });
 }
 
 export function toPlace(row: BedRow): BedPlace {
-  return { bedId: row.id, unitId: row.unit_id, label: row.label, row: row.row, column: row.column, isOpen: row.is_open === 1 };
+  return {
+    bedId: row.id,
+    unitId: row.unit_id,
+    label: row.label,
+    row: row.row,
+    column: row.column,
+    isOpen: row.is_open === 1,
+  };
 }
 
 /** Who has this bed in the shifts that run or are to come, by their newest published assignment. */
 export async function publishedAssignments(
   db: Knex,
-  { unitId, bedId, notEndedAt, changedBy }: { unitId: string; bedId: string; notEndedAt: string; changedBy?: string },
+  {
+    unitId,
+    bedId,
+    notEndedAt,
+    changedBy,
+  }: { unitId: string; bedId: string; notEndedAt: string; changedBy?: string },
 ): Promise<BedAssignment[]> {
   const found: BedAssignment[] = [];
   for (const shift of await shiftsNotEnded(db, unitId, notEndedAt)) {
-    const assignment = await latestAssignment(db, shift.id, { publishedOnly: true, ...(changedBy === undefined ? {} : { changedBy }) });
+    const assignment = await latestAssignment(db, shift.id, {
+      publishedOnly: true,
+      ...(changedBy === undefined ? {} : { changedBy }),
+    });
     const place = assignment?.places.find((one) => one.bedId === bedId);
     if (!place) continue;
     const people = await shiftPeople(db, shift.id);
     const person = people.find((one) => one.person_id === place.personId);
     if (!person) continue;
     found.push({
-      shiftId: shift.id, startsAt: shift.starts_at, endsAt: shift.ends_at,
-      personId: person.person_id, initials: person.initials, displayName: person.display_name,
+      shiftId: shift.id,
+      startsAt: shift.starts_at,
+      endsAt: shift.ends_at,
+      personId: person.person_id,
+      initials: person.initials,
+      displayName: person.display_name,
       coverInitials: people.find((one) => one.person_id === place.coverPersonId)?.initials ?? null,
     });
   }

@@ -1,5 +1,5 @@
-import type { RecordedKind } from '@windrow/ventilation/contract/observations';
 import { bedForAudience } from '@windrow/ventilation/board/for-audience';
+import type { RecordedKind } from '@windrow/ventilation/contract/observations';
 import { conflict } from '../errors.ts';
 import type { StayRow } from '../queries/stays.ts';
 import { appendObservation } from './append-observation.ts';
@@ -9,12 +9,22 @@ import type { Write } from './write.ts';
 /** A check, gas, airway, airway check or happening: appended, the bed's row rebuilt, the screens told. */
 export async function recordObservation(
   write: Write,
-  { stay, kind, entry }: { stay: StayRow; kind: RecordedKind; entry: { observedAt: string } & Record<string, unknown> },
+  {
+    stay,
+    kind,
+    entry,
+  }: { stay: StayRow; kind: RecordedKind; entry: { observedAt: string } & Record<string, unknown> },
 ) {
   const bedId = requirePresent(stay);
   requireObservedTime({ observedAt: entry.observedAt, now: write.now });
   const { observedAt, ...body } = entry;
-  const observationId = await appendObservation(write, { stayId: stay.id, unitId: stay.unit_id, kind, observedAt, body });
+  const observationId = await appendObservation(write, {
+    stayId: stay.id,
+    unitId: stay.unit_id,
+    kind,
+    observedAt,
+    body,
+  });
   const { revision, bed } = await write.bedChanged(bedId);
   await write.audit({ act: `record ${kind}`, unitId: stay.unit_id, subject: observationId });
   return { observationId, revision, bed: bedForAudience({ bed, audience: 'staff', now: write.now }) };
@@ -23,9 +33,10 @@ export async function recordObservation(
 /** The bed of a stay that is still here; nothing is recorded on one that has left. */
 export function requirePresent(stay: StayRow): string {
   if (stay.left_at !== null || stay.bed_id === null) {
-    throw conflict(`This stay ended at ${stay.left_at}; nothing can be recorded on it. Choose the patient again.`, [
-      { path: 'stayId', message: `the stay ended at ${stay.left_at}; only a present stay takes entries` },
-    ]);
+    throw conflict(
+      `This stay ended at ${stay.left_at}; nothing can be recorded on it. Choose the patient again.`,
+      [{ path: 'stayId', message: `the stay ended at ${stay.left_at}; only a present stay takes entries` }],
+    );
   }
   return stay.bed_id;
 }

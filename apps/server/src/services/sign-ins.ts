@@ -1,10 +1,10 @@
 import { hash, verify } from '@node-rs/argon2';
+import type { Grant } from '@windrow/ventilation/permissions/permissions';
 import type { Knex } from 'knex';
 import { Lucia, TimeSpan } from 'lucia';
+import type { Settings } from '../config/settings.ts';
 import { grantsOf, personByUsername } from '../queries/people.ts';
 import { sessionAdapter } from '../queries/session-adapter.ts';
-import type { Grant } from '@windrow/ventilation/permissions/permissions';
-import type { Settings } from '../config/settings.ts';
 
 export type SignedIn = {
   sessionId: string;
@@ -19,6 +19,7 @@ export type SignedIn = {
 type PersonAttributes = { username: string; displayName: string; initials: string };
 
 declare module 'lucia' {
+  // biome-ignore lint/style/useConsistentTypeDefinitions: Lucia is told our types by merging into its interface
   interface Register {
     Lucia: ReturnType<typeof makeLucia>;
     DatabaseUserAttributes: PersonAttributes;
@@ -68,7 +69,9 @@ export function signIns(db: Knex, settings: Settings) {
     async open(personId: string, now: Date) {
       const grants = await grantsOf(db, personId);
       const onlyDisplay = grants.length > 0 && grants.every(({ role }) => role === 'display');
-      const endsAt = new Date(now.getTime() + (onlyDisplay ? DISPLAY_DAYS * 24 : STAFF_HOURS) * 3_600_000).toISOString();
+      const endsAt = new Date(
+        now.getTime() + (onlyDisplay ? DISPLAY_DAYS * 24 : STAFF_HOURS) * 3_600_000,
+      ).toISOString();
       const session = await lucia.createSession(personId, { endsAt });
       return { sessionId: session.id, cookie: lucia.createSessionCookie(session.id).serialize() };
     },
@@ -79,7 +82,9 @@ export function signIns(db: Knex, settings: Settings) {
     },
 
     /** Who a cookie header stands for, with a cookie to set where the session was just renewed. */
-    async whoIs(cookieHeader: string | undefined): Promise<{ person: SignedIn | null; cookie: string | null }> {
+    async whoIs(
+      cookieHeader: string | undefined,
+    ): Promise<{ person: SignedIn | null; cookie: string | null }> {
       const sessionId = lucia.readSessionCookie(cookieHeader ?? '');
       if (!sessionId) return { person: null, cookie: null };
       const { session, user } = await lucia.validateSession(sessionId);
@@ -87,7 +92,11 @@ export function signIns(db: Knex, settings: Settings) {
       const { username, displayName, initials } = user;
       return {
         person: {
-          sessionId: session.id, personId: user.id, username, displayName, initials,
+          sessionId: session.id,
+          personId: user.id,
+          username,
+          displayName,
+          initials,
           grants: await grantsOf(db, user.id),
           expiresAt: session.expiresAt.toISOString(),
         },

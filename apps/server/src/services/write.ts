@@ -45,8 +45,12 @@ export async function writeOnce(
     const write = beginWrite(deps, { trx, person: request.person, tell });
     const done = await act(write);
     await insertKey(trx, {
-      person_id: request.person.personId, key: request.key, request_hash: requestHash,
-      status: done.status, response: JSON.stringify(done.body), created_at: write.now,
+      person_id: request.person.personId,
+      key: request.key,
+      request_hash: requestHash,
+      status: done.status,
+      response: JSON.stringify(done.body),
+      created_at: write.now,
     });
     return done;
   });
@@ -55,10 +59,15 @@ export async function writeOnce(
 }
 
 /** The tools of one write; also used by the demonstration's filling and by commands, which have no request. */
-export function beginWrite(deps: Pick<Deps, 'now'>, { trx, person, tell }: { trx: Knex.Transaction; person: SignedIn; tell: Tell }): Write {
+export function beginWrite(
+  deps: Pick<Deps, 'now'>,
+  { trx, person, tell }: { trx: Knex.Transaction; person: SignedIn; tell: Tell },
+): Write {
   const now = deps.now().toISOString();
   return {
-    trx, person, now,
+    trx,
+    person,
+    now,
     async bedChanged(bedId) {
       const bed = await rebuildBed(trx, { bedId, now });
       const changed = { revision: bed.revision, unitId: bed.unitId, bed };
@@ -70,6 +79,14 @@ export function beginWrite(deps: Pick<Deps, 'now'>, { trx, person, tell }: { trx
       await deleteSessionsOf(trx, personId);
       tell.dropped.push(personId);
     },
-    audit: ({ act, unitId, subject }) => insertAudit(trx, { at: now, person_id: person.personId, act, unit_id: unitId, subject, outcome: 'done' }),
+    audit: ({ act, unitId, subject }) =>
+      insertAudit(trx, {
+        at: now,
+        person_id: person.personId,
+        act,
+        unit_id: unitId,
+        subject,
+        outcome: 'done',
+      }),
   };
 }

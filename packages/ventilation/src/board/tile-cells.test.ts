@@ -20,7 +20,7 @@ type Given = {
 };
 
 function shown(mode: SupportId, { settings = {}, readings = {}, derived = {} }: Given): string {
-  const rows = tileCells({ mode, settings, readings, derived: { ...NOTHING, ...derived } });
+  const rows = tileCells({ mode, settings, readings, passive: null, derived: { ...NOTHING, ...derived } });
   return rows.map((row) => row.map(({ value, label }) => `${value} ${label}`).join(' · ')).join(' | ');
 }
 
@@ -135,7 +135,13 @@ describe('tileCells', () => {
   it('says every cell in words, with a unit or as not recorded', () => {
     for (const { id, required } of SUPPORT_CATALOGUE) {
       const settings = Object.fromEntries(required.map((key) => [key, 30]));
-      for (const cell of tileCells({ mode: id, settings, readings: {}, derived: NOTHING }).flat()) {
+      for (const cell of tileCells({
+        mode: id,
+        settings,
+        readings: {},
+        passive: null,
+        derived: NOTHING,
+      }).flat()) {
         expect(cell.words).toMatch(/not recorded|cmH2O|%|mL|Hz|L\/min|per minute/);
       }
     }
@@ -148,6 +154,7 @@ describe('tileCells', () => {
         mode: id,
         settings: given.settings ?? {},
         readings: given.readings ?? {},
+        passive: null,
         derived: { ...NOTHING, ...given.derived },
       }).flat();
       expect(new Set(cells.map(({ key }) => key)).size).toBe(cells.length);

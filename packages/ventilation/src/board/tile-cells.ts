@@ -7,7 +7,7 @@ import { tidalVolumeOf } from './derive-check.ts';
 /** One value of a tile with what stands under it, and the same said in full for those who listen. */
 export type TileCell = { key: string; value: string; label: string; words: string };
 
-export type CheckToShow = Pick<BedCheck, 'mode' | 'settings' | 'readings' | 'derived'>;
+export type CheckToShow = Pick<BedCheck, 'mode' | 'settings' | 'readings' | 'passive' | 'derived'>;
 
 /** A tile's two rows: what is moved, then the pressures and the oxygen it takes. */
 export type TileCells = readonly [TileCell[], TileCell[]];

@@ -14,12 +14,10 @@ function isTimeZone(zone: string): boolean {
 
 export const NewUnit = z.strictObject({
   name: z.string().trim().min(1).max(60),
-  timeZone: z
-    .string()
-    .refine(isTimeZone, {
-      error: (issue) =>
-        `must be a zone of the time zone database, such as Europe/London, not ${JSON.stringify(issue.input)}`,
-    }),
+  timeZone: z.string().refine(isTimeZone, {
+    error: (issue) =>
+      `must be a zone of the time zone database, such as Europe/London, not ${JSON.stringify(issue.input)}`,
+  }),
 });
 export type NewUnit = z.infer<typeof NewUnit>;
 

@@ -7,7 +7,8 @@ const SAFE = new Set(['GET', 'HEAD', 'OPTIONS']);
 /** Writes come from our own pages only. @source OWASP CSRF prevention: Fetch Metadata, with the Origin header as its fallback. */
 export function sameOriginWrites(origin: string | null): RequestHandler {
   return (req, _res, next) => {
-    if (!SAFE.has(req.method) && !isSameOrigin(req, origin)) throw notAllowed('This request came from another site.');
+    if (!SAFE.has(req.method) && !isSameOrigin(req, origin))
+      throw notAllowed('This request came from another site.');
     next();
   };
 }

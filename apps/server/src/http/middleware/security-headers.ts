@@ -1,5 +1,5 @@
-import helmet from 'helmet';
 import type { RequestHandler } from 'express';
+import helmet from 'helmet';
 
 /** What a browser may load and do here: only our own files, no inline code, no frames, nothing kept of the API. */
 export function securityHeaders(origin: string | null): RequestHandler {

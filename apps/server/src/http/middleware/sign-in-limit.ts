@@ -18,7 +18,12 @@ export function signInLimit(): RequestHandler {
     legacyHeaders: false,
     keyGenerator: (req) => `${ipKeyGenerator(req.ip ?? '')} ${usernameOf(req.body)}`,
     handler: () => {
-      throw new Refusal(429, 'too-many-tries', 'Too many tries', `After ${TRIES} wrong tries wait ${WINDOW_MINUTES} minutes, or ask the administrator for a new password.`);
+      throw new Refusal(
+        429,
+        'too-many-tries',
+        'Too many tries',
+        `After ${TRIES} wrong tries wait ${WINDOW_MINUTES} minutes, or ask the administrator for a new password.`,
+      );
     },
   });
 }

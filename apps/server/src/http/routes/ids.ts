@@ -41,6 +41,9 @@ export async function requireObservation(db: Db, id: string): Promise<Observatio
 }
 
 /** Where the authority over each thing lies. */
-export const inUnit = async ({ db }: Deps, { params }: { params: { unitId: string } }) => (await requireUnit(db, params.unitId)).id;
-export const inUnitOfStay = async ({ db }: Deps, { params }: { params: { stayId: string } }) => (await requireStay(db, params.stayId)).unit_id;
-export const inUnitOfBed = async ({ db }: Deps, { params }: { params: { bedId: string } }) => (await requireBed(db, params.bedId)).unit_id;
+export const inUnit = async ({ db }: Deps, { params }: { params: { unitId: string } }) =>
+  (await requireUnit(db, params.unitId)).id;
+export const inUnitOfStay = async ({ db }: Deps, { params }: { params: { stayId: string } }) =>
+  (await requireStay(db, params.stayId)).unit_id;
+export const inUnitOfBed = async ({ db }: Deps, { params }: { params: { bedId: string } }) =>
+  (await requireBed(db, params.bedId)).unit_id;
