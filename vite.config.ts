@@ -1,8 +1,8 @@
 import { resolve } from 'node:path';
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
-import { configDefaults, defineConfig } from 'vitest/config';
 import type { Plugin } from 'vite';
+import { configDefaults, defineConfig } from 'vitest/config';
 
 const serverPort = Number(process.env.PORT ?? 4310);
 
@@ -14,7 +14,8 @@ function appAddresses(): Plugin {
       server.middlewares.use((req, _res, next) => {
         const url = req.url ?? '/';
         const isPage = req.headers.accept?.includes('text/html') && !url.startsWith('/apps/');
-        if (isPage) req.url = /^\/wall(\/|\?|$)/.test(url) ? '/apps/wall/index.html' : '/apps/tablet/index.html';
+        if (isPage)
+          req.url = /^\/wall(\/|\?|$)/.test(url) ? '/apps/wall/index.html' : '/apps/tablet/index.html';
         next();
       });
     },
@@ -41,7 +42,9 @@ export default defineConfig(({ isSsrBuild }) => ({
         emptyOutDir: true,
         target: 'node20',
         sourcemap: true,
-        rolldownOptions: { input: { main: 'apps/server/src/main.ts', 'rebuild-board': 'apps/server/src/rebuild-board.ts' } },
+        rolldownOptions: {
+          input: { main: 'apps/server/src/main.ts', 'rebuild-board': 'apps/server/src/rebuild-board.ts' },
+        },
       }
     : {
         outDir: 'apps/server/dist/public',
@@ -56,7 +59,11 @@ export default defineConfig(({ isSsrBuild }) => ({
         },
       },
   test: {
-    include: ['packages/**/*.test.{ts,tsx}', 'apps/**/*.test.{ts,tsx}', 'tests/{published,api,faults}/**/*.test.ts'],
+    include: [
+      'packages/**/*.test.{ts,tsx}',
+      'apps/**/*.test.{ts,tsx}',
+      'tests/{published,api,faults}/**/*.test.ts',
+    ],
     exclude: [...configDefaults.exclude, '**/dist/**'],
     env: { TZ: 'UTC' },
     setupFiles: ['tests/support/console-guard.ts'],

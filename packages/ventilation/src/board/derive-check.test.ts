@@ -53,6 +53,11 @@ describe('deriveCheck', () => {
     expect(reading({ intrinsicPeepCmH2O: 14 }).drivingPressureCmH2O).toBeNull();
   });
 
+  it('has no compliance where plateau and PEEP are all but equal', () => {
+    expect(reading({ vtExhaledMl: 440, plateauCmH2O: 8.8 }).staticComplianceMlCmH2O).toBeNull();
+    expect(reading({ vtExhaledMl: 440, plateauCmH2O: 9 }).staticComplianceMlCmH2O).toBeCloseTo(440, 10);
+  });
+
   it('reckons mechanical power by what the mode controls', () => {
     expect(derive({}).mechanicalPowerJMin).toBeCloseTo(0.098 * 20 * 0.44 * (28 - 7), 1);
     const settings = { pInspCmH2O: 16, rateSetPerMin: 18, peepCmH2O: 8, fio2Percent: 45 };
