@@ -59,11 +59,7 @@ export default defineConfig(({ isSsrBuild }) => ({
         },
       },
   test: {
-    include: [
-      'packages/**/*.test.{ts,tsx}',
-      'apps/**/*.test.{ts,tsx}',
-      'tests/{published,api,faults}/**/*.test.ts',
-    ],
+    include: ['{apps,packages,db}/**/*.test.{ts,tsx}', 'tests/{published,api,faults}/**/*.test.ts'],
     exclude: [...configDefaults.exclude, '**/dist/**'],
     env: { TZ: 'UTC' },
     setupFiles: ['tests/support/console-guard.ts'],

@@ -19,7 +19,7 @@ export function settingsChangedAfter(
     .reverse()
     .find((fact) => fact.body.toSupport !== undefined && fact.observedAt > instant);
   const times = [changed?.observedAt, support?.observedAt].filter((time) => time !== undefined);
-  return times.length > 0 ? times.reduce((first, time) => (time < first ? time : first)) : null;
+  return times.sort()[0] ?? null;
 }
 
 function sameSettings(
