@@ -4,7 +4,7 @@ import { latestOf } from './latest-of.ts';
 
 /** The device in the airway now: the last one placed, unless it was removed or the patient extubated since. */
 export function deviceNow({ airway, happenings }: StayFacts): BedStay['device'] {
-  if (!airway || airway.body.event !== 'placed') return null;
+  if (airway?.body.event !== 'placed') return null;
   const extubated = latestOf(happenings, ['extubated-planned', 'extubated-unplanned']);
   if (extubated && extubated.observedAt >= airway.observedAt) return null;
   const { kind, sizeMm, depthCm, depthMark, cuffed, subglotticPort } = airway.body;
