@@ -14,7 +14,10 @@ export class Windrow {
   private process: ChildProcess | null = null;
   private readonly folder = mkdtempSync(join(tmpdir(), 'windrow-journey-'));
 
-  private constructor(readonly port: number, private readonly demo: boolean) {}
+  private constructor(
+    readonly port: number,
+    private readonly demo: boolean,
+  ) {}
 
   static async start({ demo }: { demo: boolean }): Promise<Windrow> {
     const windrow = new Windrow(await freePort(), demo);
@@ -31,9 +34,24 @@ export class Windrow {
     this.process = spawn(process.execPath, [join(ROOT, 'apps/server/dist/server/main.js')], {
       cwd: ROOT,
       stdio: ['ignore', 'ignore', 'inherit'],
-      env: { ...process.env, PORT: String(this.port), WINDROW_DATABASE: join(this.folder, 'record.sqlite3'), WINDROW_DEMO: this.demo ? '1' : '0', WINDROW_LOG: 'warn' },
+      env: {
+        ...process.env,
+        PORT: String(this.port),
+        WINDROW_DATABASE: join(this.folder, 'record.sqlite3'),
+        WINDROW_DEMO: this.demo ? '1' : '0',
+        WINDROW_LOG: 'warn',
+      },
     });
-    await expect.poll(() => fetch(`${this.url}/api/health`).then((answer) => answer.status, () => 0), { timeout: 30_000 }).toBe(200);
+    await expect
+      .poll(
+        () =>
+          fetch(`${this.url}/api/health`).then(
+            (answer) => answer.status,
+            () => 0,
+          ),
+        { timeout: 30_000 },
+      )
+      .toBe(200);
   }
 
   /** As if the power went: no time to say good-bye. */
@@ -55,7 +73,9 @@ function freePort(): Promise<number> {
     probe.once('error', reject);
     probe.listen(0, '127.0.0.1', () => {
       const address = probe.address();
-      probe.close(() => (typeof address === 'object' && address ? resolve(address.port) : reject(new Error('no port'))));
+      probe.close(() =>
+        typeof address === 'object' && address ? resolve(address.port) : reject(new Error('no port')),
+      );
     });
   });
 }
@@ -66,7 +86,7 @@ type Fixtures = {
   /** A house that nobody has set up yet. */
   emptyWindrow: Windrow;
   /** A browser of its own for each screen, watched: no request leaves the origin, and no error is printed. */
-  screen: (where: Windrow, size: { width: number; height: number }) => Promise<Page>;
+  open: (where: Windrow, size: { width: number; height: number }) => Promise<Page>;
 };
 
 export const test = base.extend<Fixtures>({
@@ -82,7 +102,7 @@ export const test = base.extend<Fixtures>({
     await use(windrow);
     await windrow.dispose();
   },
-  screen: async ({ browser }, use) => {
+  open: async ({ browser }, use) => {
     const faults: string[] = [];
     const contexts: Awaited<ReturnType<typeof browser.newContext>>[] = [];
     await use(async (where, size) => {
@@ -95,7 +115,11 @@ export const test = base.extend<Fixtures>({
       });
       page.on('console', (message) => {
         // A refused sign-in and a server that was killed on purpose are printed by the browser itself.
-        if (message.type() === 'error' && !/Failed to load resource|WebSocket connection/.test(message.text())) faults.push(`printed ${message.text()}`);
+        if (
+          message.type() === 'error' &&
+          !/Failed to load resource|WebSocket connection/.test(message.text())
+        )
+          faults.push(`printed ${message.text()}`);
       });
       page.on('pageerror', (error) => faults.push(`threw ${error.message}`));
       return page;
@@ -111,7 +135,13 @@ export const WALL = { width: 1920, height: 1080 };
 export const LANDSCAPE = { width: 1180, height: 820 };
 export const PORTRAIT = { width: 820, height: 1180 };
 
-export async function signIn(page: Page, windrow: Windrow, username: string, path = '/', password = PASSWORD): Promise<void> {
+export async function signIn(
+  page: Page,
+  windrow: Windrow,
+  username: string,
+  path = '/',
+  password = PASSWORD,
+): Promise<void> {
   await page.goto(`${windrow.url}${path}`);
   await page.getByLabel('User name').fill(username);
   await page.getByLabel('Password').fill(password);
@@ -120,6 +150,10 @@ export async function signIn(page: Page, windrow: Windrow, username: string, pat
 
 /** WCAG 2.2 AA by axe, on the page as it is now. */
 export async function expectAccessible(page: Page): Promise<void> {
-  const { violations } = await new AxeBuilder({ page }).withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa']).analyze();
-  expect(violations.map(({ id, nodes }) => `${id}: ${nodes.map((node) => node.target.join(' ')).join(', ')}`)).toEqual([]);
+  const { violations } = await new AxeBuilder({ page })
+    .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'])
+    .analyze();
+  expect(
+    violations.map(({ id, nodes }) => `${id}: ${nodes.map((node) => node.target.join(' ')).join(', ')}`),
+  ).toEqual([]);
 }

@@ -1,13 +1,33 @@
 /** Entries as a tablet sends them, with overrides: what a test is about stands in the test. */
 export function aPatient(over: Record<string, unknown> = {}) {
-  return { hospitalNumber: `H${Math.random().toString(36).slice(2, 10)}`, familyName: 'Varga', givenName: 'Ilse', bornOn: '1961-03-04', sex: 'female', heightCm: 165, ...over };
+  return {
+    hospitalNumber: `H${Math.random().toString(36).slice(2, 10)}`,
+    familyName: 'Varga',
+    givenName: 'Ilse',
+    bornOn: '1961-03-04',
+    sex: 'female',
+    heightCm: 165,
+    ...over,
+  };
 }
 
 export function anAdmission(bedId: string, observedAt: string, over: Record<string, unknown> = {}) {
-  return { bedId, observedAt, patient: aPatient(), difficultAirway: false, precautions: null, careLimits: null, orders: { checkEveryMinutes: null, gasEveryMinutes: null }, ...over };
+  return {
+    bedId,
+    observedAt,
+    patient: aPatient(),
+    difficultAirway: false,
+    precautions: null,
+    careLimits: null,
+    orders: { checkEveryMinutes: null, gasEveryMinutes: null },
+    ...over,
+  };
 }
 
-export function aCheck(observedAt: string, over: { settings?: object; readings?: object; [key: string]: unknown } = {}) {
+export function aCheck(
+  observedAt: string,
+  over: { settings?: object; readings?: object; [key: string]: unknown } = {},
+) {
   return {
     observedAt,
     mode: 'ac-vc',
@@ -23,5 +43,14 @@ export function aGas(observedAt: string, over: Record<string, unknown> = {}) {
 }
 
 export function anAirway(observedAt: string, over: Record<string, unknown> = {}) {
-  return { observedAt, event: 'placed', kind: 'oral-tube', sizeMm: 7.5, depthCm: 22, depthMark: 'lip', cuffed: true, ...over };
+  return {
+    observedAt,
+    event: 'placed',
+    kind: 'oral-tube',
+    sizeMm: 7.5,
+    depthCm: 22,
+    depthMark: 'lip',
+    cuffed: true,
+    ...over,
+  };
 }

@@ -1,6 +1,6 @@
 import { createServer } from 'node:http';
 import type { AddressInfo } from 'node:net';
-import { pino } from 'pino';
+import { type DestinationStream, pino } from 'pino';
 import type { Settings } from './config/settings.ts';
 import type { Deps } from './deps.ts';
 import { makeApp } from './http/app.ts';
@@ -14,16 +14,17 @@ const HOUR_MS = 3_600_000;
 
 export type Running = { deps: Deps; url: string; stop: () => Promise<void> };
 
-/** Opens the record, brings it up to date, and serves. `now` and `publicFolder` are the tests' to choose. */
+/** Opens the record, brings it up to date, and serves. `now`, `publicFolder` and `logTo` are the tests' to choose. */
 export async function startServer(
   settings: Settings,
   {
     version,
     publicFolder,
     now = () => new Date(),
-  }: { version: string; publicFolder: string; now?: () => Date },
+    logTo,
+  }: { version: string; publicFolder: string; now?: () => Date; logTo?: DestinationStream },
 ): Promise<Running> {
-  const log = pino({ level: settings.logLevel });
+  const log = pino({ level: settings.logLevel }, logTo);
   const db = await openDatabase(settings.database);
   await migrateDatabase(db);
   const deps: Deps = {

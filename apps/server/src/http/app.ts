@@ -3,6 +3,7 @@ import { join } from 'node:path';
 import express, { type Express, type Response } from 'express';
 import { pinoHttp } from 'pino-http';
 import type { Deps } from '../deps.ts';
+import { onlyJson } from './middleware/only-json.ts';
 import { answerProblems, BODY_LIMIT_KB, noSuchRoute } from './middleware/problems.ts';
 import { sameOriginWrites } from './middleware/same-origin.ts';
 import { neverStored, securityHeaders } from './middleware/security-headers.ts';
@@ -29,6 +30,7 @@ function apiRouter(deps: Deps) {
   router.use(
     neverStored,
     sameOriginWrites(deps.settings.origin),
+    onlyJson,
     express.json({ limit: `${BODY_LIMIT_KB}kb`, strict: false }),
   );
   router.post('/session', signInLimit());

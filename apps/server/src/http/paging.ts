@@ -4,12 +4,24 @@ import { z } from 'zod';
 export const Paging = z.strictObject({
   limit: z.coerce
     .number({ error: 'must be a whole number from 1 to 200' })
-    .int()
+    .int({ error: 'must be a whole number from 1 to 200' })
     .min(1, { error: 'must be 1 to 200' })
     .max(200, { error: 'must be 1 to 200' })
     .default(50),
   cursor: z.string().max(200).optional(),
 });
+
+const notACursor = { error: 'must be the nextCursor of an earlier page' };
+
+/** Lists that page by a sequence number, and those that page by a time: any other cursor is refused, not guessed at. */
+export const PagingBySequence = Paging.extend({
+  cursor: z
+    .string()
+    .regex(/^\d{1,15}$/, notACursor)
+    .transform(Number)
+    .optional(),
+});
+export const PagingByTime = Paging.extend({ cursor: z.iso.datetime(notACursor).optional() });
 
 export function pageOf<S extends z.ZodType>(item: S) {
   return z.object({ items: z.array(item), nextCursor: z.string().nullable() });

@@ -14,7 +14,19 @@ export async function insertAudit(db: Knex, row: Omit<AuditRow, 'id'>): Promise<
   await db<AuditRow>('audit').insert(row);
 }
 
-export type AuditScope = { personId: string } | { unitIds: readonly string[]; personId: string } | 'all';
+/** Who last did this to a thing, and when. */
+export async function lastActOn(db: Knex, { act, subject }: { act: string; subject: string }) {
+  const row: { at: string; display_name: string } | undefined = await db<AuditRow>('audit')
+    .join('people', 'people.id', 'audit.person_id')
+    .select('audit.at', 'people.display_name')
+    .where({ 'audit.act': act, 'audit.subject': subject, 'audit.outcome': 'done' })
+    .orderBy('audit.id', 'desc')
+    .first();
+  return row ?? null;
+}
+
+/** Own acts and those in some units, or everything. */
+export type AuditScope = { personId: string; unitIds: readonly string[] } | 'all';
 
 export async function auditPage(
   db: Knex,
@@ -37,8 +49,7 @@ export async function auditPage(
   if (before !== null) void query.where('audit.id', '<', before);
   if (scope !== 'all') {
     void query.where((on) => {
-      void on.where('audit.person_id', scope.personId);
-      if ('unitIds' in scope) void on.orWhereIn('audit.unit_id', [...scope.unitIds]);
+      void on.where('audit.person_id', scope.personId).orWhereIn('audit.unit_id', [...scope.unitIds]);
     });
   }
   return (await query) as (AuditRow & { display_name: string | null })[];

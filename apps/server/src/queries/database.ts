@@ -23,6 +23,8 @@ export async function openDatabase(filename: string): Promise<Knex> {
     client: ImmediateClient,
     connection: { filename },
     useNullAsDefault: true,
+    // An error names its statement and not the values in it: those are patients, and errors are logged.
+    compileSqlOnError: false,
     pool: { min: 1, max: 1, afterCreate: prepare },
     migrations: { migrationSource },
   });

@@ -37,6 +37,10 @@ export async function ventilatorAtBed(db: Knex, bedId: string): Promise<Ventilat
   return (await db<VentilatorRow>('ventilators').where({ bed_id: bedId, state: 'in-use' }).first()) ?? null;
 }
 
+export async function ventilatorByAssetNumber(db: Knex, assetNumber: string): Promise<VentilatorRow | null> {
+  return (await db<VentilatorRow>('ventilators').where({ asset_number: assetNumber }).first()) ?? null;
+}
+
 export async function ventilatorPage(db: Knex, { limit, after }: { limit: number; after: string | null }) {
   const query = db<VentilatorRow>('ventilators')
     .leftJoin('beds', 'beds.id', 'ventilators.bed_id')

@@ -17,6 +17,7 @@ import {
   updateVentilator,
   type VentilatorRow,
   ventilatorAtBed,
+  ventilatorByAssetNumber,
   ventilatorById,
 } from '../queries/ventilators.ts';
 import { requireObservedTime } from './observed-time.ts';
@@ -55,7 +56,7 @@ export async function moveVentilator(
   const bed = move.bedId ? await requireBed(write, move.bedId) : null;
   const unitId = bed?.unit_id ?? move.unitId ?? defaultUnit(ventilator, state);
   if (unitId !== null && !(await unitById(write.trx, unitId))) throw notFound('unit', 'unitId', unitId);
-  requireMayMove(write, { from: ventilator.state, to: state, unitId: unitId ?? ventilator.unit_id });
+  requireMayMove(write, { ventilator, to: state, unitId });
   await applyMove(write, ventilator, {
     state,
     unitId,
@@ -104,6 +105,10 @@ export async function machineToCleaning(
 export async function addVentilator(write: Write, entry: NewVentilator): Promise<string> {
   if (entry.homeUnitId !== null && !(await unitById(write.trx, entry.homeUnitId)))
     throw notFound('unit', 'homeUnitId', entry.homeUnitId);
+  if (await ventilatorByAssetNumber(write.trx, entry.assetNumber))
+    throw conflict(`There is a machine ${entry.assetNumber} already.`, [
+      { path: 'assetNumber', message: 'is taken' },
+    ]);
   const id = randomUUID();
   await insertVentilator(write.trx, {
     id,
@@ -166,13 +171,21 @@ async function requireBed({ trx }: Write, bedId: string): Promise<BedRow> {
   return bed;
 }
 
+/**
+ * Asked of the unit where the machine goes, and of the one that it is taken from, whatever the move names.
+ * Only a ready machine is anybody's to take: it is carried to where a patient needs it.
+ */
 function requireMayMove(
   { person }: Write,
-  { from, to, unitId }: { from: VentilatorState; to: VentilatorState; unitId: string | null },
+  { ventilator, to, unitId }: { ventilator: VentilatorRow; to: VentilatorState; unitId: string | null },
 ): void {
-  if (may(person.grants, 'manage-fleet', null) || may(person.grants, 'manage-fleet', unitId)) return;
+  const { state: from, unit_id: standsIn } = ventilator;
+  const isTaken = from === 'ready' && to === 'in-use';
   const isBedside = BEDSIDE_MOVES.some(([one, other]) => one === from && other === to);
-  if (isBedside && may(person.grants, 'use-ventilator', unitId)) return;
+  const units = [unitId ?? standsIn, ...(isTaken || standsIn === null ? [] : [standsIn])];
+  const mayIn = (unit: string | null) =>
+    may(person.grants, 'manage-fleet', unit) || (isBedside && may(person.grants, 'use-ventilator', unit));
+  if (units.every(mayIn)) return;
   throw notAllowed(
     'Bedside staff take a ready machine into use at a bed of their unit, and return it to cleaning; other moves belong to those who manage the fleet.',
   );

@@ -9,7 +9,7 @@ import type {
   Transfer,
 } from '@windrow/ventilation/contract/stays';
 import { StayDetails } from '@windrow/ventilation/contract/stays';
-import { conflict, notFound } from '../errors.ts';
+import { conflict, invalid, notFound } from '../errors.ts';
 import type { Place } from '../queries/stay-facts.ts';
 import { stayFacts } from '../queries/stay-facts.ts';
 import {
@@ -27,9 +27,13 @@ import { requireObservedTime } from './observed-time.ts';
 import { requirePresent } from './record-observation.ts';
 import type { Write } from './write.ts';
 
+/** The furthest that a clock on earth runs ahead of UTC. */
+const FIRST_DAWN_HOURS = 14;
+
 /** Admits a patient to an open, empty bed. */
 export async function admitStay(write: Write, { bedId, observedAt, ...details }: Admission) {
   requireObservedTime({ observedAt, now: write.now });
+  requireBorn(details.patient, write.now);
   const bed = await requireFreeBed(write, bedId);
   await requireNotHere(write, details.patient.hospitalNumber);
   const stayId = randomUUID();
@@ -65,13 +69,15 @@ export async function correctStay(
   const facts = await stayFacts(write.trx, stay.id);
   if (!facts) throw new Error(`stay ${stay.id} has no details`);
   const details = StayDetails.parse({ ...facts.details, ...correction });
+  requireBorn(details.patient, write.now);
   if (details.patient.hospitalNumber !== stay.hospital_number)
     await requireNotHere(write, details.patient.hospitalNumber);
   await appendObservation(write, {
     stayId: stay.id,
     unitId: stay.unit_id,
     kind: 'details',
-    observedAt: write.now,
+    // An admission may have been entered a little ahead of the server's clock; its correction still comes after it.
+    observedAt: write.now < stay.admitted_at ? stay.admitted_at : write.now,
     body: details,
   });
   await updateStay(write.trx, stay.id, { hospital_number: details.patient.hospitalNumber });
@@ -90,6 +96,7 @@ export async function transferStay(
     throw conflict('The stay is in this bed already.', [
       { path: 'bedId', message: 'is where the stay is now' },
     ]);
+  requireSinceAdmission(stay, observedAt);
   const bed = await requireFreeBed(write, bedId);
   await updateStay(write.trx, stay.id, { unit_id: bed.unit_id, bed_id: bed.id });
   await appendPlace(write, {
@@ -113,11 +120,7 @@ export async function dischargeStay(
 ) {
   const bedId = requirePresent(stay);
   requireObservedTime({ observedAt, now: write.now });
-  if (observedAt < stay.admitted_at) {
-    throw conflict(`The stay began at ${stay.admitted_at}; it cannot end before.`, [
-      { path: 'observedAt', message: `must not be before ${stay.admitted_at}, not ${observedAt}` },
-    ]);
-  }
+  requireSinceAdmission(stay, observedAt);
   await updateStay(write.trx, stay.id, {
     bed_id: null,
     left_at: observedAt,
@@ -133,6 +136,20 @@ export async function dischargeStay(
   await machineToCleaning(write, { bedId, observedAt });
   await write.audit({ act: 'discharge', unitId: stay.unit_id, subject: stay.id });
   return { stay: await readStay(write, stay.id), bed: await changedBed(write, bedId) };
+}
+
+function requireSinceAdmission(stay: StayRow, observedAt: string): void {
+  if (observedAt >= stay.admitted_at) return;
+  throw conflict(`The stay began at ${stay.admitted_at}; it cannot move or end before.`, [
+    { path: 'observedAt', message: `must not be before ${stay.admitted_at}, not ${observedAt}` },
+  ]);
+}
+
+/** Nobody is born after today, wherever on earth it is already tomorrow. */
+function requireBorn({ bornOn }: StayDetails['patient'], now: string): void {
+  const today = new Date(Date.parse(now) + FIRST_DAWN_HOURS * 3_600_000).toISOString().slice(0, 10);
+  if (bornOn > today)
+    throw invalid([{ path: 'patient.bornOn', message: `must be not after ${today}, not ${bornOn}` }]);
 }
 
 async function appendPlace(

@@ -22,10 +22,9 @@ export async function readRecord(
 }
 
 function readCursor(cursor: string): { observedAt: string; sequence: number } {
-  const [observedAt, sequence] = cursor.split('_');
-  if (!observedAt || Number.isNaN(Date.parse(observedAt)) || !Number.isSafeInteger(Number(sequence))) {
+  const [, observedAt, sequence] = /^([\d-]+T[\d:.]+Z)_(\d{1,15})$/.exec(cursor) ?? [];
+  if (observedAt === undefined)
     throw invalid([{ path: 'cursor', message: 'must be the nextCursor of an earlier page' }]);
-  }
   return { observedAt, sequence: Number(sequence) };
 }
 

@@ -1,5 +1,5 @@
-import { type BedPlace, bedBoard } from '@windrow/ventilation/board/bed-board';
-import type { Bed, BedAssignment } from '@windrow/ventilation/contract/board';
+import { bedBoard } from '@windrow/ventilation/board/bed-board';
+import type { Bed, BedAssignment, BedPlace } from '@windrow/ventilation/contract/board';
 import type { Knex } from 'knex';
 import { putBoardRow } from '../queries/board-rows.ts';
 import { policyOf } from '../queries/policies.ts';

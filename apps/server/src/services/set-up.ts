@@ -10,11 +10,12 @@ import type {
   PolicyChange,
   PolicyVersion,
 } from '@windrow/ventilation/contract/setup';
+import type { Grant } from '@windrow/ventilation/permissions/permissions';
 import { DEFAULT_POLICY } from '@windrow/ventilation/policy/policy';
 import type { Knex } from 'knex';
 import type { Deps } from '../deps.ts';
 import { conflict, notFound, staleVersion } from '../errors.ts';
-import { insertAudit } from '../queries/audit.ts';
+import { insertAudit, lastActOn } from '../queries/audit.ts';
 import {
   anyPerson,
   grantsOf,
@@ -79,7 +80,7 @@ export async function addBed(write: Write, { unitId, bed }: { unitId: string; be
   });
   await write.audit({ act: 'add bed', unitId, subject: id });
   write.changed({ topic: 'units', unitId });
-  return (await write.bedChanged(id)).bed;
+  return asPlace((await write.bedChanged(id)).bed);
 }
 
 export async function openOrCloseBed(
@@ -92,7 +93,12 @@ export async function openOrCloseBed(
     ]);
   await setBedOpen(write.trx, bed.id, isOpen);
   await write.audit({ act: isOpen ? 'open bed' : 'close bed', unitId: bed.unit_id, subject: bed.id });
-  return (await write.bedChanged(bed.id)).bed;
+  return asPlace((await write.bedChanged(bed.id)).bed);
+}
+
+/** A bed as those who set up the house may see it: the place, and nothing of whoever lies in it. */
+function asPlace(bed: Bed): Bed {
+  return { ...bed, stay: null };
 }
 
 export async function addPerson(deps: Deps, write: Write, entry: NewPerson): Promise<Person> {
@@ -116,18 +122,28 @@ export async function addPerson(deps: Deps, write: Write, entry: NewPerson): Pro
   return toPerson(write.trx, row);
 }
 
+const CHANGE_PERSON = 'change person';
+
 /** Changes roles, password, or whether somebody may sign in; every open session of theirs ends. */
 export async function changePerson(
   deps: Deps,
   write: Write,
   { person, change, version }: { person: PersonRow; change: PersonChange; version: number },
 ): Promise<Person> {
-  if (version !== person.version)
-    throw staleVersion({ thing: 'person', given: version, current: person.version, by: null, at: null });
+  if (version !== person.version) {
+    const last = await lastActOn(write.trx, { act: CHANGE_PERSON, subject: person.id });
+    throw staleVersion({
+      thing: 'person',
+      given: version,
+      current: person.version,
+      by: last?.display_name ?? null,
+      at: last?.at ?? null,
+    });
+  }
   if (change.grants) await requireKnownUnits(write.trx, change.grants);
   if (
     person.id === write.person.personId &&
-    (change.disabled || change.grants?.every(({ role }) => role !== 'administrator'))
+    (change.disabled || change.grants?.every((grant) => !isOfWholeHouse(grant)))
   ) {
     throw conflict('An administrator cannot shut themselves out; another administrator does that.', [
       {
@@ -146,12 +162,17 @@ export async function changePerson(
   if (change.grants) await replaceGrants(write.trx, person.id, change.grants);
   // Whoever signs in next has the new roles; a connection opened under the old ones must not stay.
   if (person.id !== write.person.personId) await write.signOut(person.id);
-  await write.audit({ act: 'change person', unitId: null, subject: person.id });
+  await write.audit({ act: CHANGE_PERSON, unitId: null, subject: person.id });
   return toPerson(write.trx, {
     ...person,
     version: person.version + 1,
     disabled_at: change.disabled === undefined ? person.disabled_at : change.disabled ? write.now : null,
   });
+}
+
+/** What whoever changes people holds: the administrator of one unit could not give it back. */
+function isOfWholeHouse({ role, unitId }: Grant): boolean {
+  return role === 'administrator' && unitId === null;
 }
 
 export async function toPerson(db: Knex, row: PersonRow): Promise<Person> {

@@ -41,6 +41,9 @@ function makeLucia(db: Knex, settings: Settings) {
     sessionCookie: {
       // `__Host-` binds the cookie to this very host; browsers accept it only over TLS.
       name: secure ? '__Host-windrow' : 'windrow',
+      // The server alone ends a session. A cookie that ended with it would leave a wall signed out, whose
+      // session is renewed through its open link, where no new cookie can be set.
+      expires: false,
       attributes: { secure, sameSite: 'strict', path: '/' },
     },
     getUserAttributes: ({ username, displayName, initials }) => ({ username, displayName, initials }),
@@ -66,11 +69,12 @@ export function signIns(db: Knex, settings: Settings) {
       return person && isRight && person.disabled_at === null ? person.id : null;
     },
 
-    async open(personId: string, now: Date) {
+    /** By the real clock, as everything about sessions: the library knows no other. */
+    async open(personId: string) {
       const grants = await grantsOf(db, personId);
       const onlyDisplay = grants.length > 0 && grants.every(({ role }) => role === 'display');
       const endsAt = new Date(
-        now.getTime() + (onlyDisplay ? DISPLAY_DAYS * 24 : STAFF_HOURS) * 3_600_000,
+        Date.now() + (onlyDisplay ? DISPLAY_DAYS * 24 : STAFF_HOURS) * 3_600_000,
       ).toISOString();
       const session = await lucia.createSession(personId, { endsAt });
       return { sessionId: session.id, cookie: lucia.createSessionCookie(session.id).serialize() };
@@ -98,7 +102,8 @@ export function signIns(db: Knex, settings: Settings) {
           displayName,
           initials,
           grants: await grantsOf(db, user.id),
-          expiresAt: session.expiresAt.toISOString(),
+          // A session that was just renewed says when it would end without its own end.
+          expiresAt: [session.expiresAt.toISOString(), session.endsAt].sort()[0] ?? session.endsAt,
         },
         cookie: session.fresh ? lucia.createSessionCookie(session.id).serialize() : null,
       };

@@ -64,7 +64,8 @@ function instantOf(local: string, timeZone: string): number {
   return localMoment(second, timeZone) === local ? second : Math.max(guess, second);
 }
 
-function dayAfter(day: string, days: number): string {
+/** The day of the calendar so many days later. */
+export function dayAfter(day: string, days: number): string {
   return new Date(Date.parse(`${day}T00:00Z`) + days * DAY_MS).toISOString().slice(0, 10);
 }
 

@@ -1,4 +1,4 @@
-import type { Bed, BedAssignment, BedStay } from '../contract/board.ts';
+import type { Bed, BedAssignment, BedPlace, BedStay } from '../contract/board.ts';
 import { bedFlags } from '../flags/bed-flags.ts';
 import { predictedBodyWeight } from '../physiology/predicted-body-weight.ts';
 import { ladderFor, type Policy } from '../policy/policy.ts';
@@ -9,9 +9,6 @@ import { deriveGas } from './derive-gas.ts';
 import type { StayFacts } from './facts.ts';
 import { latestOf } from './latest-of.ts';
 import { settingsChangedAfter } from './settings-changed-after.ts';
-
-/** The place itself, without anything that changes by the hour. */
-export type BedPlace = Pick<Bed, 'bedId' | 'unitId' | 'label' | 'row' | 'column' | 'isOpen'>;
 
 /**
  * A bed's board row, from the facts of the stay in it. Pure and without a clock: it holds the times of

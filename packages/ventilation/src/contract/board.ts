@@ -157,6 +157,17 @@ export const Bed = z.object({
 });
 export type Bed = z.infer<typeof Bed>;
 
+/** The place itself, without anything that changes by the hour. */
+export const BedPlace = Bed.pick({
+  bedId: true,
+  unitId: true,
+  label: true,
+  row: true,
+  column: true,
+  isOpen: true,
+});
+export type BedPlace = z.infer<typeof BedPlace>;
+
 export const Unit = z.object({
   unitId: Id,
   name: z.string(),

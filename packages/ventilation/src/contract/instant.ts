@@ -21,6 +21,11 @@ export const Id = z.string().min(1).max(64);
 /** Short free text; longer than this belongs in the chart, not on a board. */
 export const Note = z.string().trim().max(500);
 
+/** A change that names no field would still be stored, and count as one. */
+export const changesSomething = (change: object): boolean =>
+  Object.values(change).some((value) => value !== undefined);
+export const nothingToChange = { error: 'names nothing to change' };
+
 /** Why something was changed: never empty. */
 export const Reason = z
   .string()

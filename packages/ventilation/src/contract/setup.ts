@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { Policy } from '../policy/policy.ts';
-import { Id, Reason } from './instant.ts';
+import { changesSomething, Id, nothingToChange, Reason } from './instant.ts';
 import { Grant, NewPassword } from './session.ts';
 
 function isTimeZone(zone: string): boolean {
@@ -30,6 +30,14 @@ export type NewBed = z.infer<typeof NewBed>;
 
 export const BedOpening = z.strictObject({ isOpen: z.boolean() });
 
+/** The roles of one person: each once in a unit, or once in the whole hospital. */
+const Grants = z
+  .array(Grant)
+  .max(30)
+  .refine((grants) => new Set(grants.map(({ role, unitId }) => `${role} ${unitId}`)).size === grants.length, {
+    error: 'each role is given once in a unit',
+  });
+
 export const NewPerson = z.strictObject({
   username: z
     .string()
@@ -41,15 +49,17 @@ export const NewPerson = z.strictObject({
   displayName: z.string().trim().min(2).max(80),
   initials: z.string().trim().min(1).max(3).toUpperCase(),
   password: NewPassword,
-  grants: z.array(Grant).max(30),
+  grants: Grants,
 });
 export type NewPerson = z.infer<typeof NewPerson>;
 
-export const PersonChange = z.strictObject({
-  grants: z.array(Grant).max(30).optional(),
-  disabled: z.boolean().optional(),
-  password: NewPassword.optional(),
-});
+export const PersonChange = z
+  .strictObject({
+    grants: Grants.optional(),
+    disabled: z.boolean().optional(),
+    password: NewPassword.optional(),
+  })
+  .refine(changesSomething, nothingToChange);
 export type PersonChange = z.infer<typeof PersonChange>;
 
 export const Person = z.object({

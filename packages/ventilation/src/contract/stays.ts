@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { PATIENT_FIELDS } from '../entry/fields.ts';
 import { numberSchema } from '../entry/number-schema.ts';
-import { Day, Id, Instant, Note } from './instant.ts';
+import { changesSomething, Day, Id, Instant, Note, nothingToChange } from './instant.ts';
 
 export const SEXES = ['female', 'male'] as const;
 
@@ -34,7 +34,7 @@ export const Admission = StayDetails.extend({ bedId: Id, observedAt: Instant });
 export type Admission = z.infer<typeof Admission>;
 
 /** Correct who the patient is, or what is ordered; what is left out stays as it is. */
-export const StayCorrection = StayDetails.partial();
+export const StayCorrection = StayDetails.partial().refine(changesSomething, nothingToChange);
 export type StayCorrection = z.infer<typeof StayCorrection>;
 
 export const Transfer = z.strictObject({ bedId: Id, observedAt: Instant });

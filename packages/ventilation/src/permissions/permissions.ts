@@ -48,6 +48,7 @@ const MAY: Record<Role, readonly Act[]> = {
     'see-fleet',
     'see-capacity',
     'see-policy',
+    'see-audit',
   ],
   charge: [
     'see-board',

@@ -14,6 +14,13 @@ export const AGED_KINDS = ['check', 'airway', 'gas'] as const;
 /** The groups of facts that a tile ages apart: settings and readings; depth and cuff; the gas. */
 export type AgedKind = (typeof AGED_KINDS)[number];
 
+/** Of two bounds that a flag is judged between, the lower stands below; otherwise every value would be flagged. */
+const THRESHOLD_PAIRS = [
+  ['vtPerKgNoteMl', 'vtPerKgHighMl'],
+  ['pfLowMmHg', 'pfModerateMmHg'],
+  ['cuffLowCmH2O', 'cuffHighCmH2O'],
+] as const;
+
 const task = z.strictObject({
   minutes: z.number().min(0).max(240),
   everyMinutes: z.number().int().min(15).max(2880),
@@ -22,22 +29,34 @@ const task = z.strictObject({
 /** What a unit has decided: intervals, thresholds and the minutes its tasks take. Kept by version. */
 export const Policy = z.strictObject({
   freshness: z.strictObject({ check: AgeLadder, airway: AgeLadder, gas: AgeLadder }),
-  thresholds: z.strictObject({
-    vtPerKgHighMl: z.number().min(4).max(15),
-    vtPerKgNoteMl: z.number().min(4).max(15),
-    plateauHighCmH2O: z.number().min(15).max(60),
-    drivingPressureHighCmH2O: z.number().min(5).max(40),
-    mechanicalPowerHighJMin: z.number().min(5).max(60),
-    intrinsicPeepHighCmH2O: z.number().min(1).max(20),
-    fio2HighPercent: z.number().min(30).max(100),
-    pfModerateMmHg: z.number().min(50).max(400),
-    pfLowMmHg: z.number().min(50).max(400),
-    phLow: z.number().min(6.8).max(7.4),
-    cuffLowCmH2O: z.number().min(5).max(40),
-    cuffHighCmH2O: z.number().min(10).max(60),
-    depthMovedCm: z.number().min(0.5).max(10),
-    rateAboveSetPerMin: z.number().min(3).max(40),
-  }),
+  thresholds: z
+    .strictObject({
+      vtPerKgHighMl: z.number().min(4).max(15),
+      vtPerKgNoteMl: z.number().min(4).max(15),
+      plateauHighCmH2O: z.number().min(15).max(60),
+      drivingPressureHighCmH2O: z.number().min(5).max(40),
+      mechanicalPowerHighJMin: z.number().min(5).max(60),
+      intrinsicPeepHighCmH2O: z.number().min(1).max(20),
+      fio2HighPercent: z.number().min(30).max(100),
+      pfModerateMmHg: z.number().min(50).max(400),
+      pfLowMmHg: z.number().min(50).max(400),
+      phLow: z.number().min(6.8).max(7.4),
+      cuffLowCmH2O: z.number().min(5).max(40),
+      cuffHighCmH2O: z.number().min(10).max(60),
+      depthMovedCm: z.number().min(0.5).max(10),
+      rateAboveSetPerMin: z.number().min(3).max(40),
+    })
+    .superRefine((thresholds, ctx) => {
+      for (const [low, high] of THRESHOLD_PAIRS) {
+        if (thresholds[low] <= thresholds[high]) continue;
+        ctx.addIssue({
+          code: 'custom',
+          path: [high],
+          input: thresholds[high],
+          message: `must be at least ${low}, ${thresholds[low]}, not ${thresholds[high]}`,
+        });
+      }
+    }),
   tasks: z.strictObject({
     check: task,
     airwayCare: task,

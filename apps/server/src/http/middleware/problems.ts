@@ -2,6 +2,7 @@ import type { Problem } from '@windrow/ventilation/contract/problem';
 import type { ErrorRequestHandler, RequestHandler } from 'express';
 import type { Logger } from 'pino';
 import { malformed, notFound, Refusal } from '../../errors.ts';
+import { isNotSaving } from '../../queries/not-saving.ts';
 
 export const BODY_LIMIT_KB = 64;
 
@@ -47,7 +48,7 @@ function toProblem(error: unknown): Problem {
   if (isCoded(error) && (error.status === 404 || code === 'ENOENT'))
     return notFound('file', 'path', 'asked for').problem;
   if (error instanceof URIError) return malformed('The address is not well-formed.').problem;
-  if (code === 'SQLITE_FULL' || code?.startsWith('SQLITE_IOERR') || code === 'SQLITE_READONLY') {
+  if (isNotSaving(error)) {
     return {
       type: 'urn:windrow:problem:not-saving',
       title: 'Not saving',

@@ -10,7 +10,7 @@ import { bedById } from '../../queries/units.ts';
 import { movePage, type VentilatorRow, ventilatorPage } from '../../queries/ventilators.ts';
 import { addVentilator, moveVentilator, requireVentilator } from '../../services/move-ventilator.ts';
 import { readCapacity } from '../../services/read-capacity.ts';
-import { Paging, pageOf, toPage } from '../paging.ts';
+import { Paging, PagingBySequence, pageOf, toPage } from '../paging.ts';
 import { type Route, read, write } from '../route.ts';
 import { VentilatorParams } from './ids.ts';
 
@@ -65,13 +65,16 @@ export const fleetRoutes: Route[] = [
     path: '/api/ventilators/:ventilatorId/moves',
     summary: 'Where a machine was, newest first',
     params: VentilatorParams,
-    query: Paging,
+    query: PagingBySequence,
     response: pageOf(VentilatorMoved),
     needs: { act: 'see-fleet', in: 'any' },
     handle: async ({ deps, input: { params, query } }) => {
       const { id } = await requireVentilator(deps.db, params.ventilatorId);
-      const before = query.cursor === undefined ? null : Number(query.cursor) || 0;
-      const rows = await movePage(deps.db, { ventilatorId: id, limit: query.limit + 1, before });
+      const rows = await movePage(deps.db, {
+        ventilatorId: id,
+        limit: query.limit + 1,
+        before: query.cursor ?? null,
+      });
       return toPage(rows, query.limit, {
         item: (row): VentilatorMoved => ({
           moveId: row.id,

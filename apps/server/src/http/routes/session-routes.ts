@@ -61,7 +61,7 @@ export const sessionRoutes: Route[] = [
     body: SignIn,
     response: Session,
     status: 201,
-    handle: async ({ deps, input, res }) => {
+    handle: async ({ deps, person, input, res }) => {
       const personId = await deps.signIns.personFor(input.body);
       await insertAudit(deps.db, {
         at: deps.now().toISOString(),
@@ -79,6 +79,11 @@ export const sessionRoutes: Route[] = [
           'Not signed in',
           'The user name or the password is not right.',
         );
+      // One browser, one session: whoever was signed in here before is so no longer.
+      if (person) {
+        await deps.signIns.close(person.sessionId);
+        deps.live.drop(person.sessionId);
+      }
       return openSession(deps, personId, res);
     },
   }),
@@ -113,7 +118,7 @@ async function openSession(
   personId: string,
   res: { appendHeader: (name: string, value: string) => unknown },
 ): Promise<Session> {
-  const { cookie } = await deps.signIns.open(personId, deps.now());
+  const { cookie } = await deps.signIns.open(personId);
   res.appendHeader('Set-Cookie', cookie);
   const { person } = await deps.signIns.whoIs(cookie);
   if (!person) throw notSignedIn();

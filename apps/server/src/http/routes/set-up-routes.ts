@@ -1,4 +1,4 @@
-import { Bed, Unit } from '@windrow/ventilation/contract/board';
+import { Bed, BedPlace, Unit } from '@windrow/ventilation/contract/board';
 import {
   AuditEntry,
   BedOpening,
@@ -11,9 +11,11 @@ import {
   PolicyVersion,
 } from '@windrow/ventilation/contract/setup';
 import { notFound } from '../../errors.ts';
-import { auditPage } from '../../queries/audit.ts';
+import { type AuditScope, auditPage } from '../../queries/audit.ts';
 import { peoplePage, personById } from '../../queries/people.ts';
 import { policyOf } from '../../queries/policies.ts';
+import { bedsOfUnit } from '../../queries/units.ts';
+import { toPlace } from '../../services/rebuild-bed.ts';
 import {
   addBed,
   addPerson,
@@ -24,7 +26,8 @@ import {
   toPerson,
   toPolicyVersion,
 } from '../../services/set-up.ts';
-import { Paging, pageOf, toPage } from '../paging.ts';
+import type { SignedIn } from '../../services/sign-ins.ts';
+import { Paging, PagingBySequence, pageOf, toPage } from '../paging.ts';
 import { type Route, read, write } from '../route.ts';
 import { BedParams, inUnit, inUnitOfBed, PersonParams, requireBed, UnitParams } from './ids.ts';
 
@@ -51,6 +54,17 @@ export const setUpRoutes: Route[] = [
     status: 201,
     needs: { act: 'set-up', in: inUnit },
     handle: ({ write, input }) => addBed(write, { unitId: input.params.unitId, bed: input.body }),
+  }),
+  read({
+    path: '/api/units/:unitId/beds',
+    summary: 'The beds of a unit as places: nothing of who lies in them',
+    params: UnitParams,
+    response: pageOf(BedPlace),
+    needs: { act: 'set-up', in: inUnit },
+    handle: async ({ deps, input }) => ({
+      items: (await bedsOfUnit(deps.db, input.params.unitId)).map(toPlace),
+      nextCursor: null,
+    }),
   }),
   write({
     method: 'patch',
@@ -129,21 +143,14 @@ export const setUpRoutes: Route[] = [
   read({
     path: '/api/audit',
     summary: 'Who did what, when: own acts, those of own units, or all, by role',
-    query: Paging,
+    query: PagingBySequence,
     response: pageOf(AuditEntry),
-    needs: 'anybody-signed-in',
+    needs: { act: 'see-audit', in: 'any' },
     handle: async ({ deps, person, input: { query } }) => {
-      const units = person.grants
-        .filter(({ role }) => role === 'charge')
-        .flatMap(({ unitId }) => unitId ?? []);
-      const seesAll = person.grants.some(
-        ({ role, unitId }) => role === 'administrator' || (role === 'charge' && unitId === null),
-      );
-      const scope = seesAll ? 'all' : { personId: person.personId, unitIds: units };
       const rows = await auditPage(deps.db, {
-        scope,
+        scope: auditScope(person),
         limit: query.limit + 1,
-        before: query.cursor === undefined ? null : Number(query.cursor) || 0,
+        before: query.cursor ?? null,
       });
       return toPage(rows, query.limit, {
         item: (row): AuditEntry => ({
@@ -161,3 +168,10 @@ export const setUpRoutes: Route[] = [
     },
   }),
 ];
+
+/** Own acts for everybody; those of a unit for whoever leads or sets up the unit; all for who does so in the whole house. */
+function auditScope({ personId, grants }: SignedIn): AuditScope {
+  const leads = grants.filter(({ role }) => role === 'charge' || role === 'administrator');
+  if (leads.some(({ unitId }) => unitId === null)) return 'all';
+  return { personId, unitIds: leads.flatMap(({ unitId }) => unitId ?? []) };
+}

@@ -15,7 +15,7 @@ import {
   readShift,
   requireShift,
 } from '../../services/plan-shift.ts';
-import { Paging, pageOf } from '../paging.ts';
+import { PagingByTime, pageOf } from '../paging.ts';
 import { type Route, read, write } from '../route.ts';
 import { inUnit, ShiftParams, UnitParams } from './ids.ts';
 
@@ -42,7 +42,7 @@ export const shiftRoutes: Route[] = [
     path: '/api/units/:unitId/shifts',
     summary: 'Shifts of a unit, the latest first',
     params: UnitParams,
-    query: Paging,
+    query: PagingByTime,
     response: pageOf(Shift),
     needs: { act: 'see-shifts', in: inUnit },
     handle: async ({ deps, input: { params, query } }) => {

@@ -2,7 +2,7 @@ import type { BedStay } from '../../contract/board.ts';
 import type { AirwayKind, MASK_INTERFACES } from '../../contract/observations.ts';
 import { AIRWAY_FIELDS } from '../../entry/fields.ts';
 import { formatNumber } from '../../format/number.ts';
-import { isOnVentilator, supportEntry } from '../../support/catalogue.ts';
+import { supportEntry } from '../../support/catalogue.ts';
 import type { ShownBed } from '../shown-bed.ts';
 import type { TileCell } from '../tile-cells.ts';
 import { aged, type GroupView, lastAt, type Reader } from './group-view.ts';
@@ -52,13 +52,20 @@ export function airwayView({
   };
 }
 
+/** What the present support reaches the patient through; a mask of an earlier support says nothing. */
 function withoutDevice({ check, support }: BedStay): string {
-  if (check?.interface) return MASKS[check.interface];
-  const mode = check?.mode ?? support?.id;
-  if (mode === 'hfnc') return 'nasal cannula';
-  if (mode && isOnVentilator(mode))
-    return supportEntry(mode).kind === 'mask' ? 'mask not recorded' : 'no airway yet';
-  return '';
+  if (!support) return '';
+  const worn = check?.mode === support.id ? check.interface : null;
+  switch (supportEntry(support.id).kind) {
+    case 'mask':
+      return worn ? MASKS[worn] : 'mask not recorded';
+    case 'invasive':
+      return 'no airway yet';
+    case 'high-flow':
+      return 'nasal cannula';
+    default:
+      return '';
+  }
 }
 
 function kindOf({ kind }: Pick<Device, 'kind'>): { label: string; words: string } {

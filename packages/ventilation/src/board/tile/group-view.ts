@@ -1,6 +1,6 @@
 import type { FactGroup } from '../../contract/board.ts';
 import { ageInWords, formatAge } from '../../format/age.ts';
-import { formatMoment, formatTime } from '../../format/clock.ts';
+import { formatDate, formatTime } from '../../format/clock.ts';
 import type { Freshness } from '../../freshness/freshness.ts';
 import type { ShownGroup } from '../shown-bed.ts';
 import type { TileCell } from '../tile-cells.ts';
@@ -30,12 +30,13 @@ export function aged(
   return { state, age: formatAge(ageMinutes), ageWords: `${group} ${state}, ${ageInWords(ageMinutes)}` };
 }
 
-/** Within a day the time is enough, for the age stands beside it; after that the date belongs to it. */
-export function lastAt({ observedAt, ageMinutes }: ShownGroup, { now, timeZone }: Reader): string {
+/** Within a day the time says it, for the age stands beside it; after that the day does. */
+export function lastAt(
+  { observedAt, ageMinutes }: ShownGroup,
+  { timeZone }: Pick<Reader, 'timeZone'>,
+): string {
   if (observedAt === null) return '';
-  return (ageMinutes ?? 0) < DAY_MIN
-    ? formatTime(observedAt, timeZone)
-    : formatMoment(observedAt, now, timeZone);
+  return (ageMinutes ?? 0) < DAY_MIN ? formatTime(observedAt, timeZone) : formatDate(observedAt, timeZone);
 }
 
 export function beforeChange(changedSinceAt: string | null, { timeZone }: Reader): readonly string[] {

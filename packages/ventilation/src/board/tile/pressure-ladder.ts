@@ -6,7 +6,7 @@ export type PressureLadder = {
   low: number;
   /** Plateau where one was read; else the pressure that is set; null where neither is known. */
   high: number | null;
-  /** Whether `high` was read in a pause, so that the block's height is the driving pressure. */
+  /** Whether `high` is a plateau of a passive breath, so that the block's height is the driving pressure. */
   measured: boolean;
   peak: number | null;
   /** The unit's plateau limit; null where no plateau can be meant (a mask). */
@@ -14,7 +14,7 @@ export type PressureLadder = {
   words: string;
 };
 
-type CheckToDraw = Pick<BedCheck, 'mode' | 'settings' | 'readings'>;
+type CheckToDraw = Pick<BedCheck, 'mode' | 'settings' | 'readings' | 'passive'>;
 
 /** The pressures of one check, or null where the support has no such pressures. */
 export function pressureLadder({
@@ -32,11 +32,11 @@ export function pressureLadder({
   const drawn = {
     low,
     high: plateau ?? setPressure(check, low),
-    measured: plateau !== null,
+    measured: plateau !== null && check.passive !== false,
     peak: readings.peakCmH2O ?? null,
     limit: kind === 'invasive' ? plateauLimitCmH2O : null,
   };
-  return { ...drawn, words: inWords(drawn) };
+  return { ...drawn, words: inWords(drawn, plateau === null ? 'set pressure' : 'plateau') };
 }
 
 /** How high the mode itself pushes. A volume mode does not say. */
@@ -48,10 +48,10 @@ function setPressure({ mode, settings }: CheckToDraw, low: number): number | nul
   return mode === 'psv' && psCmH2O !== undefined ? low + psCmH2O : null;
 }
 
-function inWords({ low, high, measured, peak, limit }: Omit<PressureLadder, 'words'>): string {
+function inWords({ low, high, peak, limit }: Omit<PressureLadder, 'words'>, highest: string): string {
   const parts = [
     `lowest pressure ${low}`,
-    high === null ? null : `${measured ? 'plateau' : 'set pressure'} ${high}`,
+    high === null ? null : `${highest} ${high}`,
     peak === null ? null : `peak ${peak}`,
     limit === null ? null : `plateau limit ${limit}`,
   ];
