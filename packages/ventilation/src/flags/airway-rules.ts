@@ -66,7 +66,7 @@ export const AIRWAY_RULES: readonly FlagRule[] = [
       const size = CATHETERS_FR.findLast((fr) => fr <= atMost) ?? CATHETERS_FR[0];
       return {
         level: 'note',
-        short: chip(`Suction ≤ ${size} Fr`),
+        short: chip(`Suction to ${size} Fr`),
         sentence: `A tube of ${formatWithUnit(device.sizeMm, AIRWAY_FIELDS.sizeMm)} takes a suction catheter of at most ${size}\u00a0Fr, half of its inner diameter.`,
         inputs: [
           input('Tube', device.sizeMm, AIRWAY_FIELDS.sizeMm),

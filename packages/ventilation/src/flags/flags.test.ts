@@ -143,7 +143,7 @@ const EDGES: {
   {
     id: 'suction-catheter-small',
     level: 'note',
-    short: 'Suction ≤ 8 Fr',
+    short: 'Suction to 8 Fr',
     flagged: airway({}, { sizeMm: 6.5 }),
     quiet: airway({}, { sizeMm: 7 }),
   },

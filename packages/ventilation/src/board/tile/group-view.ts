@@ -10,7 +10,7 @@ export type GroupView = {
   state: Freshness;
   /** For the rail, `3h40`; null where there is nothing to be old. */
   age: string | null;
-  /** "check overdue, 4 hours 35 minutes". */
+  /** "check overdue 4 hours 35 minutes". */
   ageWords: string;
   body: { rows: readonly (readonly TileCell[])[] } | { title: string; detail: string | null };
   /** "before change 14:20", "venous": what must be read with the values. */
@@ -27,7 +27,7 @@ export function aged(
   { state, ageMinutes }: ShownGroup,
 ): Pick<GroupView, 'state' | 'age' | 'ageWords'> {
   if (ageMinutes === null) return { state, age: null, ageWords: `no ${group} yet` };
-  return { state, age: formatAge(ageMinutes), ageWords: `${group} ${state}, ${ageInWords(ageMinutes)}` };
+  return { state, age: formatAge(ageMinutes), ageWords: `${group} ${state} ${ageInWords(ageMinutes)}` };
 }
 
 /** Within a day the time says it, for the age stands beside it; after that the day does. */

@@ -121,7 +121,7 @@ describe('the tile of a bed', () => {
   });
 
   it('is named for those who listen, with the state of its check', () => {
-    expect(view(aStay({ check: aCheck(275) })).name).toBe('Bed 03, AC/VC, check overdue, 4 hours 35 minutes');
+    expect(view(aStay({ check: aCheck(275) })).name).toBe('Bed 03, AC/VC, check overdue 4 hours 35 minutes');
     expect(view(null).name).toBe('Bed 03, empty');
     expect(view(null, { isOpen: false }).name).toBe('Bed 03, closed');
   });

@@ -16,7 +16,7 @@ export type TileChip = { id: string; short: string; level: 'note' | 'attention' 
 export type TileView = {
   bedId: string;
   label: string;
-  /** For those who listen: "Bed 03, AC/PC, check overdue, 4 hours 35 minutes". */
+  /** For those who listen: "Bed 03, AC/PC, check overdue 4 hours 35 minutes". */
   name: string;
   content:
     | { kind: 'empty' | 'closed' }
