@@ -57,14 +57,12 @@ it('name a failing of the database, and hold none of the values that it was give
   const before = lines.length;
   const failed = [
     await house.as('therapist').post(`/api/stays/${stayId}/checks`, aCheck(house.ago(0), { note })),
-    await house
-      .as('therapist')
-      .post(
-        '/api/stays',
-        anAdmission(house.bed(house.alder, 1), house.ago(1), {
-          patient: { ...patient, hospitalNumber: `${hospitalNumber}2` },
-        }),
-      ),
+    await house.as('therapist').post(
+      '/api/stays',
+      anAdmission(house.bed(house.alder, 1), house.ago(1), {
+        patient: { ...patient, hospitalNumber: `${hospitalNumber}2` },
+      }),
+    ),
   ];
   for (const { status, problem, text } of failed) {
     expect(status).toBe(500);

@@ -1,13 +1,13 @@
 import { Bed, Board, Unit } from '@windrow/ventilation/contract/board';
 import { Ventilator } from '@windrow/ventilation/contract/fleet';
-import { Person } from '@windrow/ventilation/contract/setup';
+import { Person, PolicyVersion } from '@windrow/ventilation/contract/setup';
 import type { Grant } from '@windrow/ventilation/permissions/permissions';
 import type { DestinationStream } from 'pino';
 import { readSettings } from '../../apps/server/src/config/settings.ts';
 import { startServer } from '../../apps/server/src/start-server.ts';
 import { Caller } from './caller.ts';
 import { anAdmission } from './entries.ts';
-import { Placed, Recorded, RecordPage } from './shapes.ts';
+import { listOf, Placed, Recorded, RecordPage } from './shapes.ts';
 
 export const PASSWORD = 'correct horse battery';
 
@@ -110,6 +110,12 @@ export async function openHouse({ database = ':memory:', origin, logTo }: Openin
       (await as(who).post(`/api/stays/${stayId}/${path}`, entry)).as(Recorded),
     recordOf: async (stayId: string, who = 'supervisor') =>
       (await as(who).get(`/api/stays/${stayId}/record?limit=200`)).as(RecordPage).items,
+    policyOf: async (unit: HouseUnit) =>
+      (await admin.get(`/api/units/${unit.unitId}/policy`)).as(PolicyVersion),
+    machine: async (assetNumber: string) => {
+      const { items } = (await as('biomedical').get('/api/ventilators')).as(listOf(Ventilator));
+      return items.find((machine) => machine.assetNumber === assetNumber);
+    },
     /** A machine of the fleet that stands ready in a unit. */
     readyMachine: async (assetNumber: string, homeUnitId: string | null = alder.unitId) => {
       const entry = { assetNumber, model: 'Model T', class: 'adult-icu', homeUnitId };

@@ -33,14 +33,16 @@ export const PROBES: Record<string, (ground: Ground) => Probe | Promise<Probe>> 
     path: '/api/start/administrator',
     body: { username: 'second', displayName: 'Second Root', password: PASSWORD },
   }),
-  'POST /api/session': () => ({ path: '/api/session', body: { username: 'therapist2', password: PASSWORD } }),
+  'POST /api/session': async ({ scene, caller }) => ({
+    path: '/api/session',
+    body: { username: 'therapist2', password: PASSWORD },
+    ...(caller ? await askedOnce(scene) : {}),
+  }),
   'GET /api/session': () => ({ path: '/api/session' }),
-  'DELETE /api/session': async ({ scene, caller }) => {
-    if (!caller) return { path: '/api/session' };
-    const once = scene.house.anybody();
-    await once.signIn('therapist2', PASSWORD);
-    return { path: '/api/session', as: once };
-  },
+  'DELETE /api/session': async ({ scene, caller }) => ({
+    path: '/api/session',
+    ...(caller ? await askedOnce(scene) : {}),
+  }),
   'GET /api/units': () => ({ path: '/api/units' }),
 
   'GET /api/units/:unitId/board': (ground) => under(ground, 'board'),
@@ -149,6 +151,13 @@ export const PROBES: Record<string, (ground: Ground) => Probe | Promise<Probe>> 
   }),
   'GET /api/audit': () => ({ path: '/api/audit' }),
 };
+
+/** Somebody whose session may end with the question. */
+async function askedOnce({ house }: Scene): Promise<{ as: Caller }> {
+  const once = house.anybody();
+  await once.signIn('therapist2', PASSWORD);
+  return { as: once };
+}
 
 /** A fact that the caller recorded, where they may record; somebody else's where they may not. */
 async function ownObservation({ scene, place, caller }: Ground): Promise<string> {

@@ -26,6 +26,6 @@ export const routes: Route[] = [
     summary: 'This description',
     needs: 'nobody',
     response: z.looseObject({}),
-    handle: async ({ deps }) => openApi(served, deps.version),
+    handle: async ({ deps }) => openApi(routes, deps.version),
   }),
 ];

@@ -89,6 +89,29 @@ export async function countsByClassAndState(
     .groupBy('class', 'state');
 }
 
+export type KnownMachine = Pick<VentilatorRow, 'id' | 'asset_number' | 'model' | 'home_unit_id'> &
+  Pick<MoveRow, 'unit_id' | 'bed_id'> & { state: VentilatorState };
+
+/** Where each machine was by what had been recorded at an instant: its last move by then. */
+export async function machinesKnownAt(db: Knex, at: string): Promise<KnownMachine[]> {
+  const last = db<MoveRow>('ventilator_moves')
+    .max('sequence')
+    .where('recorded_at', '<=', at)
+    .groupBy('ventilator_id');
+  return db<MoveRow>('ventilator_moves')
+    .join('ventilators', 'ventilators.id', 'ventilator_moves.ventilator_id')
+    .whereIn('ventilator_moves.sequence', last)
+    .select<KnownMachine[]>(
+      'ventilators.id',
+      'ventilators.asset_number',
+      'ventilators.model',
+      'ventilators.home_unit_id',
+      'ventilator_moves.unit_id',
+      'ventilator_moves.bed_id',
+      { state: 'ventilator_moves.to_state' },
+    );
+}
+
 /** Machines ready in a unit: they stand there, or belong there and stand nowhere else. */
 export async function readyInUnit(db: Knex, unitId: string): Promise<number> {
   const row = await db<VentilatorRow>('ventilators')

@@ -53,10 +53,16 @@ export function openLiveLink(httpServer: HttpServer, deps: Deps): Live & { close
 
   io.use((socket, next) => {
     const cookie = socket.handshake.headers.cookie ?? '';
-    deps.signIns.whoIs(cookie).then(({ person }) => {
-      if (person) socket.data = { person, cookie };
-      next(person ? undefined : new Error('not signed in'));
-    }, next);
+    deps.signIns
+      .whoIs(cookie)
+      .then(({ person }) => {
+        if (person) socket.data = { person, cookie };
+        next(person ? undefined : new Error('not signed in'));
+      })
+      .catch((error: unknown) => {
+        deps.log.error({ err: error }, 'a session could not be read');
+        next(new Error('not now'));
+      });
   });
   io.on('connection', (socket) => {
     welcome(deps, socket).catch((error: unknown) => {
@@ -92,6 +98,17 @@ export function openLiveLink(httpServer: HttpServer, deps: Deps): Live & { close
 
 async function welcome(deps: Deps, socket: LiveSocket): Promise<void> {
   const { person } = socket.data;
+  const hearsUnits = await joinRooms(deps, socket);
+  // A screen is live from its first second, not from the next beat on.
+  for (const event of await beatsNow(deps)) {
+    const isHeard = event.unitId === null ? !hearsUnits : audienceOf(person, event.unitId, null) !== null;
+    if (isHeard) socket.emit('beat', event);
+  }
+}
+
+/** Every room that the person of a connection may hear; says whether a unit is among them. */
+async function joinRooms(deps: Deps, socket: LiveSocket): Promise<boolean> {
+  const { person } = socket.data;
   const rooms = [sessionRoom(person.sessionId), personRoom(person.personId)];
   for (const unit of await allUnits(deps.db)) {
     const audience = audienceOf(person, unit.id, socket.handshake.auth.audience);
@@ -99,11 +116,13 @@ async function welcome(deps: Deps, socket: LiveSocket): Promise<void> {
   }
   const hearsUnits = rooms.some((room) => room.startsWith('unit:'));
   await socket.join([...rooms, HOUSE_ROOM, ...(hearsUnits ? [] : [NO_UNIT_ROOM])]);
-  // A screen is live from its first second, not from the next beat on.
-  for (const event of await beatsNow(deps)) {
-    const isHeard = event.unitId === null ? !hearsUnits : audienceOf(person, event.unitId, null) !== null;
-    if (isHeard) socket.emit('beat', event);
-  }
+  if (hearsUnits) await socket.leave(NO_UNIT_ROOM);
+  return hearsUnits;
+}
+
+/** A unit that is new is heard on the screens that were open before it, or they would take their silence for calm. */
+async function joinNewUnits(deps: Deps, io: Sockets): Promise<void> {
+  for (const socket of io.sockets.sockets.values()) await joinRooms(deps, socket);
 }
 
 /** What a connection may hear of a unit. A wall asks to hear as a display even where its person may see more. */
@@ -138,8 +157,8 @@ async function beat(deps: Deps, io: Sockets): Promise<void> {
 }
 
 /** Each changed bed to the rooms of its unit, already cut to what each may see. */
-function tellRooms({ now }: Deps, io: Sockets, { beds, changed, dropped }: Tell): void {
-  const at = now().toISOString();
+function tellRooms(deps: Deps, io: Sockets, { beds, changed, dropped }: Tell): void {
+  const at = deps.now().toISOString();
   for (const { revision, unitId, bed } of beds) {
     for (const audience of ['staff', 'display'] as const) {
       io.to(unitRoom(unitId, audience)).emit('bed', {
@@ -155,6 +174,11 @@ function tellRooms({ now }: Deps, io: Sockets, { beds, changed, dropped }: Tell)
         ? [HOUSE_ROOM]
         : [unitRoom(event.unitId, 'staff'), unitRoom(event.unitId, 'display')];
     io.to(rooms).emit('changed', event);
+  }
+  if (changed.some(({ topic }) => topic === 'units')) {
+    joinNewUnits(deps, io).catch((error: unknown) =>
+      deps.log.error({ err: error }, 'a new unit is not heard'),
+    );
   }
   for (const personId of dropped) io.in(personRoom(personId)).disconnectSockets(true);
 }

@@ -10,8 +10,8 @@ import { policyOf } from '../queries/policies.ts';
 import { placeKnownAt, stayFacts } from '../queries/stay-facts.ts';
 import { staysKnownAt } from '../queries/stays.ts';
 import { bedCounts, bedsOfUnit, type UnitRow } from '../queries/units.ts';
-import { readyInUnit } from '../queries/ventilators.ts';
-import { publishedAssignments, toPlace } from './rebuild-bed.ts';
+import { type KnownMachine, machinesKnownAt, readyInUnit } from '../queries/ventilators.ts';
+import { publishedAssignments, toPlace, toVentilatorAtBed } from './rebuild-bed.ts';
 
 /** Every bed of a unit as it stands, cut to what the reader may see. */
 export async function readBoard(
@@ -40,9 +40,14 @@ export async function lookBack(
   const serverTime = deps.now().toISOString();
   if (at > serverTime)
     throw invalid([{ path: 'at', message: `must not be after the server's time, ${serverTime}, not ${at}` }]);
-  const beds = await bedsKnownAt(deps.db, { unitId: unit.id, at });
+  const machines = await machinesKnownAt(deps.db, at);
+  const beds = await bedsKnownAt(deps.db, { unitId: unit.id, at, machines });
+  const ready = machines.filter(
+    ({ state, unit_id, home_unit_id }) => state === 'ready' && (unit_id ?? home_unit_id) === unit.id,
+  );
   return {
     ...(await boardHead(deps, unit)),
+    fleet: { ready: ready.length },
     revision: unit.revision,
     serverTime,
     at,
@@ -51,7 +56,10 @@ export async function lookBack(
 }
 
 /** The rows as the facts recorded by an instant make them. Their revision is 0: it belongs to the live sequence. */
-export async function bedsKnownAt(db: Knex, { unitId, at }: { unitId: string; at: string }): Promise<Bed[]> {
+async function bedsKnownAt(
+  db: Knex,
+  { unitId, at, machines }: { unitId: string; at: string; machines: KnownMachine[] },
+): Promise<Bed[]> {
   const { policy } = await policyOf(db, unitId, at);
   const stayOfBed = new Map<string, string>();
   for (const stay of await staysKnownAt(db, at)) {
@@ -61,6 +69,7 @@ export async function bedsKnownAt(db: Knex, { unitId, at }: { unitId: string; at
   const beds: Bed[] = [];
   for (const row of await bedsOfUnit(db, unitId)) {
     const stayId = stayOfBed.get(row.id);
+    const machine = machines.find(({ state, bed_id }) => state === 'in-use' && bed_id === row.id);
     beds.push(
       bedBoard({
         place: toPlace(row),
@@ -68,7 +77,7 @@ export async function bedsKnownAt(db: Knex, { unitId, at }: { unitId: string; at
         facts: stayId === undefined ? null : await stayFacts(db, stayId, { recordedBy: at }),
         policy,
         assignments: await publishedAssignments(db, { unitId, bedId: row.id, notEndedAt: at, changedBy: at }),
-        ventilator: null,
+        ventilator: machine ? toVentilatorAtBed(machine) : null,
       }),
     );
   }

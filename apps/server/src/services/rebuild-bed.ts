@@ -7,7 +7,9 @@ import { latestAssignment, shiftPeople, shiftsNotEnded } from '../queries/shifts
 import { stayFacts } from '../queries/stay-facts.ts';
 import { stayInBed } from '../queries/stays.ts';
 import { type BedRow, bedById, nextRevision } from '../queries/units.ts';
-import { ventilatorAtBed } from '../queries/ventilators.ts';
+import { type VentilatorRow, ventilatorAtBed } from '../queries/ventilators.ts';
+
+type Machine = Pick<VentilatorRow, 'id' | 'asset_number' | 'model'>;
 
 /** Computes a bed's row from the facts as they are now, stores it under the unit's next revision, and returns it. */
 export async function rebuildBed(trx: Knex, { bedId, now }: { bedId: string; now: string }): Promise<Bed> {
@@ -32,10 +34,12 @@ export async function bedFromFacts(
     facts: stay ? await stayFacts(db, stay.id) : null,
     policy,
     assignments: await publishedAssignments(db, { unitId: row.unit_id, bedId: row.id, notEndedAt: now }),
-    ventilator: machine
-      ? { ventilatorId: machine.id, assetNumber: machine.asset_number, model: machine.model }
-      : null,
+    ventilator: machine ? toVentilatorAtBed(machine) : null,
   });
+}
+
+export function toVentilatorAtBed({ id, asset_number, model }: Machine): Bed['ventilator'] {
+  return { ventilatorId: id, assetNumber: asset_number, model };
 }
 
 export function toPlace(row: BedRow): BedPlace {

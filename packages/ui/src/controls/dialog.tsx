@@ -31,7 +31,8 @@ export function Dialog({
   return (
     <Radix.Root open={open} onOpenChange={(next) => !next && onClose()}>
       <Radix.Portal>
-        <Radix.Overlay className="fixed inset-0 z-40 bg-veil" />
+        {/* Not Radix's own overlay: that writes a style element into the page, which our policy forbids. */}
+        <div className="fixed inset-0 z-40 bg-veil" />
         <Radix.Content
           {...(description ? {} : { 'aria-describedby': undefined })}
           className="fixed top-1/2 left-1/2 z-50 flex max-h-11/12 w-11/12 max-w-xl -translate-x-1/2 -translate-y-1/2 flex-col gap-4 overflow-y-auto rounded-xl border-2 border-ink bg-tile p-5 text-ink"

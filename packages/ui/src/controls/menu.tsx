@@ -15,7 +15,8 @@ export function Menu({
   children: ReactNode;
 }) {
   return (
-    <DropdownMenu.Root>
+    // A modal menu would lock the page by a style element, which our policy forbids.
+    <DropdownMenu.Root modal={false}>
       <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
       <DropdownMenu.Portal>
         <DropdownMenu.Content

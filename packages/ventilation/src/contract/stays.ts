@@ -7,9 +7,9 @@ export const SEXES = ['female', 'male'] as const;
 
 /** Who the patient is. Two identifiers at least: name and hospital number; a bed is never one. */
 export const Patient = z.strictObject({
-  hospitalNumber: z.string().trim().min(1).max(30),
-  familyName: z.string().trim().min(1).max(80),
-  givenName: z.string().trim().min(1).max(80),
+  hospitalNumber: z.string().trim().min(1, { error: 'a hospital number is needed' }).max(30),
+  familyName: z.string().trim().min(1, { error: 'a family name is needed' }).max(80),
+  givenName: z.string().trim().min(1, { error: 'a given name is needed' }).max(80),
   bornOn: Day,
   /** For the weight formula only (lung size). Null: not recorded, and then nothing is judged per kg. */
   sex: z.enum(SEXES).nullable(),

@@ -1,0 +1,41 @@
+import { NoticeHost } from '@windrow/ui/controls/notice-host';
+import type { Session } from '@windrow/ventilation/contract/session';
+import { Outlet, useNavigation } from 'react-router-dom';
+import { useCurrentUnit } from './current-unit.ts';
+import { LiveBanner } from './live-banner.tsx';
+import { useSessionOver } from './session-state.ts';
+import { ShellFooter } from './shell-footer.tsx';
+import { ShellHeader } from './shell-header.tsx';
+import { SignInAgain } from './sign-in-again.tsx';
+import { useTheme } from './theme.ts';
+
+/** What stands around every page of a signed-in person. */
+export function Shell({ session }: { session: Session }) {
+  const { unit, units } = useCurrentUnit(session);
+  const isOver = useSessionOver();
+  const isFetching = useNavigation().state === 'loading';
+  useTheme(unit);
+
+  return (
+    <>
+      <div inert={isOver} className={`min-h-dvh flex-col bg-ground text-ink ${isOver ? 'hidden' : 'flex'}`}>
+        <a href="#page" className="sr-only focus:not-sr-only focus:p-3">
+          To the page
+        </a>
+        <ShellHeader session={session} unit={unit} units={units} />
+        <LiveBanner timeZone={unit?.timeZone ?? null} />
+        <main
+          id="page"
+          tabIndex={-1}
+          aria-busy={isFetching}
+          className="flex w-full min-w-0 grow flex-col px-3 pb-3 outline-none sm:px-5"
+        >
+          <Outlet />
+        </main>
+        <ShellFooter isDemonstration={session.demonstration} />
+      </div>
+      <NoticeHost />
+      {isOver && <SignInAgain session={session} />}
+    </>
+  );
+}

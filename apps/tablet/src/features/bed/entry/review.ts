@@ -1,0 +1,66 @@
+import { type EntryRow, type EntryValue, valueInWords } from './entry-field.ts';
+import type { JudgedEntry, JudgedRow } from './judge-entry.ts';
+
+export type ReviewLine = {
+  key: string;
+  label: string;
+  before: string | null;
+  now: string;
+  isUnusual: boolean;
+};
+
+/** What exactly will be recorded, sorted by what the person has done. */
+export type Review = {
+  changed: readonly ReviewLine[];
+  confirmed: readonly ReviewLine[];
+  added: readonly ReviewLine[];
+  /** Asked for and not given: nothing is recorded for these. */
+  leftOut: readonly string[];
+};
+
+export function reviewOf({ rows }: JudgedEntry): Review {
+  const of = (change: JudgedRow['change']) => rows.filter((row) => row.change === change).flatMap(lineOf);
+  return {
+    changed: of('changed'),
+    confirmed: of('confirmed'),
+    added: of('new'),
+    leftOut: rows
+      .filter(({ row, judgement }) => judgement.state === 'empty' && row.key !== 'note')
+      .map(({ row }) => row.label),
+  };
+}
+
+function lineOf({ row, judgement, isKept }: JudgedRow): ReviewLine[] {
+  if (judgement.state !== 'valid') return [];
+  return [
+    {
+      key: row.key,
+      label: row.label,
+      before: beforeInWords(row, judgement.value),
+      now: valueInWords(row, judgement.value),
+      isUnusual: isKept,
+    },
+  ];
+}
+
+function beforeInWords(row: EntryRow, now: EntryValue): string | null {
+  return row.before.state === 'shown' && row.before.value !== now
+    ? valueInWords(row, row.before.value)
+    : null;
+}
+
+/** "2 changed · 4 as before · 5 left": how far an entry has come, in one line. */
+export function progressInWords({ rows }: JudgedEntry): string {
+  const count = (change: JudgedRow['change']) =>
+    rows.filter((row) => row.change === change && row.row.key !== 'note').length;
+  const parts = [
+    [count('changed'), 'changed'],
+    [count('confirmed'), 'as before'],
+    [count('new'), 'new'],
+    [count('empty'), 'left'],
+  ] as const;
+  return parts
+    .filter(([many]) => many > 0)
+    .map(([many, word]) => `${many} ${word}`)
+    .join(' · ');
+}
