@@ -18,7 +18,7 @@ step('type-aware rules', () => run(bin('eslint'), ['-c', '.eslint.config.mjs', '
 step('folder directions', () => run(bin('depcruise'), ['--config', '.dependency-cruiser.cjs', '--output-type', 'err', 'apps', 'packages', 'db']));
 step('types', () => run(bin('tsc'), ['--noEmit']));
 suite('unit, published, API and fault tests', 'vitest.json', (file) =>
-  run(bin('vitest'), ['run', '--reporter=dot', '--reporter=json', `--outputFile.json=${file}`]), readVitest);
+  run(bin('vitest'), ['run', '--reporter=default', '--reporter=json', `--outputFile.json=${file}`]), readVitest);
 step('build', ensureBuilt);
 step('sizes', () => run(process.execPath, [join(ROOT, '.scripts/sizes.mjs')]));
 if (!quick) {

@@ -16,6 +16,7 @@ export default defineConfig({
   use: {
     timezoneId: 'Europe/London',
     locale: 'en-GB',
+    actionTimeout: 15_000,
     viewport: { width: 1180, height: 820 },
     launchOptions: {
       ...(existsSync(SYSTEM_CHROMIUM) ? { executablePath: SYSTEM_CHROMIUM } : {}),

@@ -8,18 +8,14 @@ import { setUpRoutes } from './routes/set-up-routes.ts';
 import { shiftRoutes } from './routes/shift-routes.ts';
 import { stayRoutes } from './routes/stay-routes.ts';
 
-const served: Route[] = [
+/** Every route of the service, the description of them all among them. */
+export const routes: Route[] = [
   ...sessionRoutes,
   ...boardRoutes,
   ...stayRoutes,
   ...shiftRoutes,
   ...fleetRoutes,
   ...setUpRoutes,
-];
-
-/** Every route of the service, the description of them all among them. */
-export const routes: Route[] = [
-  ...served,
   session({
     method: 'get',
     path: '/api/openapi.json',

@@ -8,8 +8,16 @@ import { migrationSource } from '../../../../db/migration-source.ts';
 /** Knex on better-sqlite3, with transactions that take the write lock at once: none can fail half-way for another's. */
 class ImmediateClient extends BetterSqliteClient {
   override transaction(...args: Parameters<Knex.Client['transaction']>) {
+    const transaction = super.transaction(...args);
+    const undo: (connection: BetterSqlite3.Database, error: unknown) => unknown =
+      transaction.rollback.bind(transaction);
     const begin = (connection: BetterSqlite3.Database) => Promise.resolve(connection.exec('BEGIN IMMEDIATE'));
-    return Object.assign(super.transaction(...args), { begin });
+    const rollback = (connection: BetterSqlite3.Database, error: unknown) => {
+      // A full disk makes SQLite undo everything by itself; a ROLLBACK would then fail, and hide the reason.
+      if (!connection.inTransaction) connection.exec('BEGIN');
+      return undo(connection, error);
+    };
+    return Object.assign(transaction, { begin, rollback });
   }
 }
 
@@ -45,6 +53,8 @@ function prepare(
     // After WAL and on every open: the driver falls back to NORMAL by itself, and a power cut would then lose answered writes.
     connection.pragma('synchronous = FULL');
     connection.pragma('foreign_keys = ON');
+    // Else INSERT OR REPLACE deletes a row past the triggers that keep the record append-only.
+    connection.pragma('recursive_triggers = ON');
     connection.pragma('trusted_schema = OFF');
     connection.pragma('busy_timeout = 5000');
     const read = (name: string) => connection.pragma(name, { simple: true });

@@ -1,6 +1,8 @@
+import { useLive } from '@windrow/client/live/use-live';
 import { NoticeHost } from '@windrow/ui/controls/notice-host';
 import type { Session } from '@windrow/ventilation/contract/session';
 import { Outlet, useNavigation } from 'react-router-dom';
+import { useBedsidePages } from './bedside-pages.ts';
 import { useCurrentUnit } from './current-unit.ts';
 import { LiveBanner } from './live-banner.tsx';
 import { useSessionOver } from './session-state.ts';
@@ -14,11 +16,17 @@ export function Shell({ session }: { session: Session }) {
   const { unit, units } = useCurrentUnit(session);
   const isOver = useSessionOver();
   const isFetching = useNavigation().state === 'loading';
+  const { state } = useLive();
   useTheme(unit);
+  useBedsidePages(session);
 
   return (
     <>
-      <div inert={isOver} className={`min-h-dvh flex-col bg-ground text-ink ${isOver ? 'hidden' : 'flex'}`}>
+      <div
+        inert={isOver}
+        data-live={state}
+        className={`min-h-dvh flex-col bg-ground text-ink ${isOver ? 'hidden' : 'flex'}`}
+      >
         <a href="#page" className="sr-only focus:not-sr-only focus:p-3">
           To the page
         </a>

@@ -7,7 +7,7 @@ const listeners = new Set<() => void>();
 let unfinished: readonly string[] = [];
 
 function changed(): void {
-  unfinished = [...stores].flatMap((store) => store.keys());
+  unfinished = [...new Set([...stores].flatMap((store) => store.keys()))];
   for (const listener of listeners) listener();
 }
 

@@ -25,7 +25,7 @@ export function NobodyTray({
         Nobody has
       </h2>
       {count === 0 && <p className="text-ink-muted">no bed: every patient has a person</p>}
-      <ul aria-label="Beds that nobody has" className="flex min-w-0 flex-1 flex-wrap">
+      <ul aria-label="Beds that nobody has" className="flex min-w-0 flex-1 basis-full flex-wrap @2xl:basis-0">
         {children}
       </ul>
       {isTarget && count > 0 && (

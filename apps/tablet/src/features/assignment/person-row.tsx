@@ -28,7 +28,7 @@ export function PersonRow({
     <li
       ref={setNodeRef}
       data-person={person.personId}
-      className={`grid grid-cols-[1fr_auto] items-center gap-x-4 gap-y-2 rounded-xl border-2 bg-tile px-4 py-2 @4xl:grid-cols-[13rem_1fr_7rem] ${isOver ? 'border-note' : 'border-tile'}`}
+      className={`grid grid-cols-1 items-center gap-x-4 gap-y-2 rounded-xl border-2 bg-tile px-4 py-2 @md:grid-cols-[1fr_auto] @4xl:grid-cols-[13rem_1fr_7rem] ${isOver ? 'border-note' : 'border-tile'}`}
     >
       <div className="flex min-w-0 items-center gap-3">
         <span aria-hidden="true" className="rounded-md border-2 border-line px-2 py-1 font-bold">
@@ -40,7 +40,7 @@ export function PersonRow({
         </h2>
       </div>
       <Sum load={load} />
-      <div className="relative col-span-2 row-start-2 @4xl:col-span-1 @4xl:col-start-2 @4xl:row-start-1">
+      <div className="relative row-start-3 @md:col-span-2 @md:row-start-2 @4xl:col-span-1 @4xl:col-start-2 @4xl:row-start-1">
         <span
           aria-hidden="true"
           className="pointer-events-none absolute -inset-y-1 w-1 -translate-x-1/2 bg-ink"
@@ -67,7 +67,7 @@ export function PersonRow({
 
 function Sum({ load: { minutes, person, over, left } }: { load: Load }) {
   return (
-    <p className="flex flex-wrap items-baseline justify-end gap-x-2 @4xl:col-start-3 @4xl:row-start-1 @4xl:flex-col">
+    <p className="flex flex-wrap items-baseline gap-x-2 @md:justify-end @4xl:col-start-3 @4xl:row-start-1 @4xl:flex-col">
       <span className="font-bold text-2xl leading-tight">{Math.round(minutes)}</span>
       <span className="text-ink-muted text-sm">of {person.minutesAvailable} min</span>
       {over > 0 ? (

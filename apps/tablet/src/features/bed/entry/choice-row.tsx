@@ -51,14 +51,14 @@ function ChoiceChips({ row, text, onSet, onFocus }: ChoiceRowProps) {
 function ChoiceList({ row, text, fault, now, timeZone, onSet, onFocus }: ChoiceRowProps) {
   const id = `${rowId(row.key)}-list`;
   return (
-    <div className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3 gap-y-1 sm:grid-cols-[auto_auto_minmax(0,1fr)]">
+    <div className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3 gap-y-1 @md:grid-cols-[auto_auto_minmax(0,1fr)]">
       <label htmlFor={id} className="text-lg">
         {row.label}
       </label>
       <RowBefore row={row} now={now} timeZone={timeZone} />
       <select
         id={id}
-        className={`${FIELD_CLASS} col-span-2 font-bold sm:col-span-1`}
+        className={`${FIELD_CLASS} col-span-2 font-bold @md:col-span-1`}
         value={text}
         aria-required={row.needed}
         aria-invalid={fault !== null}

@@ -4,6 +4,9 @@ import { formatNumber, formatWithUnit } from '@windrow/ventilation/format/number
 /** A value of a field: a number, `off` for an alarm limit, or the word of a choice. */
 export type EntryValue = number | string;
 
+/** The values of a form by row: only what can be recorded as it stands. */
+export type EntryValues = Readonly<Record<string, EntryValue>>;
+
 /** What stands in the record for a field. After withdrawal only the time is left: an old number is no help. */
 export type Before =
   | { state: 'shown'; value: EntryValue; ageMinutes: number }

@@ -4,7 +4,7 @@ import { useEffect, useState } from 'react';
 import { EntryDock, padFor } from './entry-dock.tsx';
 import { TIME_KEY } from './entry-draft.ts';
 import { EntrySections } from './entry-sections.tsx';
-import { faultsOf, type Refusals } from './faults.ts';
+import { faultsOf } from './faults.ts';
 import type { Findings } from './findings.ts';
 import { DerivedLines, FindingFlags } from './findings-panel.tsx';
 import { obstaclesOf } from './judge-entry.ts';
@@ -12,11 +12,12 @@ import { Obstacles } from './obstacles.tsx';
 import { progressInWords } from './review.ts';
 import { focusRow } from './row-id.ts';
 import type { Entry } from './use-entry.ts';
+import type { Refused } from './use-entry-flow.ts';
 
 type EntryFillProps = {
   entry: Entry;
   findings: Findings;
-  refused: { refusals: Refusals; others: readonly string[] };
+  refused: Refused;
   /** How often the person wanted to record; from the first time on, what is missing is told. */
   tries: number;
   verb: string;
@@ -59,7 +60,7 @@ export function EntryFill({
   };
 
   return (
-    <div className="flex flex-col gap-3 dock-side:grid dock-side:grid-cols-[minmax(0,1fr)_minmax(19rem,24rem)] dock-side:items-start">
+    <div className="flex flex-col gap-3 dock-side:grid dock-side:grid-cols-[minmax(0,1fr)_clamp(17.5rem,33vw,24rem)] dock-side:items-start">
       <div className="flex min-w-0 flex-col gap-3">
         {hasNewer && (
           <Notice
@@ -77,11 +78,16 @@ export function EntryFill({
         </div>
       </div>
       <Dock entry={entry} findings={findings} onNext={goNext} />
-      <div className="sticky bottom-0 z-10 flex min-h-18 items-center gap-x-4 bg-ground py-1">
-        <Button id="review" tone="main" className="min-h-14 shrink-0 px-6 text-lg" onClick={onReview}>
+      <div className="@container sticky bottom-0 z-10 flex min-h-18 items-center gap-x-4 bg-ground py-1">
+        <Button
+          id="review"
+          tone="main"
+          className="min-h-14 px-4 text-lg sm:px-6 @xs:shrink-0"
+          onClick={onReview}
+        >
           Review and {verb.toLowerCase()}
         </Button>
-        <p className="min-w-0 text-ink-muted leading-tight">{progressInWords(judged)}</p>
+        <p className="hidden min-w-0 text-ink-muted leading-tight @xs:block">{progressInWords(judged)}</p>
       </div>
     </div>
   );
@@ -101,10 +107,10 @@ function Dock({
   return (
     <aside
       aria-label="Keypad and what the values mean"
-      className={`sticky bottom-18 z-10 flex-col gap-2 rounded-xl border-2 border-line bg-tile p-1.5 dock-side:top-2 dock-side:bottom-auto dock-side:flex dock-side:max-h-dvh dock-side:gap-3 dock-side:overflow-y-auto dock-side:border-0 dock-side:bg-transparent dock-side:p-0 ${isEmpty ? 'hidden' : 'flex'}`}
+      className={`sticky bottom-18 z-10 flex-col gap-2 rounded-xl border-2 border-line bg-tile p-1.5 dock-side:top-2 short:top-0 dock-side:in-data-[live=not-live]:top-14 dock-side:in-data-[live=withdrawn]:top-14 dock-side:bottom-auto dock-side:flex dock-side:max-h-dvh dock-side:gap-3 dock-side:overflow-y-auto dock-side:border-0 dock-side:bg-transparent dock-side:p-0 ${isEmpty ? 'hidden' : 'flex'}`}
     >
       {hasPad && (
-        <div className="order-last dock-side:order-first dock-side:rounded-xl dock-side:bg-tile dock-side:p-3">
+        <div className="order-last dock-side:order-first dock-side:rounded-xl dock-side:bg-tile dock-side:p-3 short:p-1">
           <EntryDock entry={entry} onNext={onNext} />
         </div>
       )}

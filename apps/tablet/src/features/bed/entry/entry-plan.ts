@@ -1,6 +1,5 @@
 import type { z } from 'zod';
-import type { EntrySection } from './entry-field.ts';
-import type { EntryValues } from './judge-entry.ts';
+import type { EntrySection, EntryValues } from './entry-field.ts';
 
 /**
  * What one form asks for, and what becomes of the answers. Check, airway, gas and happening are each one

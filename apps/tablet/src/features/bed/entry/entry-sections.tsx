@@ -16,13 +16,15 @@ type EntrySectionsProps = {
   onNext: (key: string) => void;
 };
 
+const PLATE = '@container rounded-xl bg-tile px-4 py-1';
+
 /** All rows of a plan, by its sections, under the time that they hold for. */
 export function EntrySections({ entry, faults, now, timeZone, onNext }: EntrySectionsProps) {
   const rows = new Map(entry.judged.rows.map((judgedRow) => [judgedRow.row.key, judgedRow]));
   return (
     <div className="flex flex-col gap-3">
       {entry.plan.timeLabel !== null && (
-        <section aria-label="Time" className="rounded-xl bg-tile px-4 py-1">
+        <div className={PLATE}>
           <TimeRow
             entry={entry}
             fault={faults[TIME_KEY] ?? null}
@@ -30,10 +32,10 @@ export function EntrySections({ entry, faults, now, timeZone, onNext }: EntrySec
             timeZone={timeZone}
             onNext={onNext}
           />
-        </section>
+        </div>
       )}
       {entry.plan.sections.map(({ title, rows: planned }) => (
-        <section key={title} aria-label={title} className="rounded-xl bg-tile px-4 py-1">
+        <div key={title} className={PLATE}>
           {planned.length > 1 && <h2 className="pt-2 font-bold text-ink-muted">{title}</h2>}
           {planned.map((row) => {
             const judgedRow = rows.get(row.key);
@@ -52,7 +54,7 @@ export function EntrySections({ entry, faults, now, timeZone, onNext }: EntrySec
               )
             );
           })}
-        </section>
+        </div>
       ))}
     </div>
   );

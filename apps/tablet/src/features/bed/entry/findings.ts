@@ -6,8 +6,8 @@ import { bedFlags } from '@windrow/ventilation/flags/bed-flags';
 import type { Policy } from '@windrow/ventilation/policy/policy';
 import { SUPPORT_IDS } from '@windrow/ventilation/support/catalogue';
 import { checkDerivedLines, type DerivedLine, gasDerivedLines } from '../derived-in-words.ts';
+import type { EntryValues } from './entry-field.ts';
 import type { EntryPlan } from './entry-plan.ts';
-import type { EntryValues } from './judge-entry.ts';
 
 /** What the values of a form would mean if they were recorded now. */
 export type Findings = { derived: readonly DerivedLine[]; flags: readonly Flag[] };

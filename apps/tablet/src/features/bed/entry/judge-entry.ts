@@ -1,5 +1,5 @@
 import type { EntryDraft } from './entry-draft.ts';
-import type { EntryRow, EntryValue } from './entry-field.ts';
+import type { EntryRow, EntryValue, EntryValues } from './entry-field.ts';
 import type { EntryPlan } from './entry-plan.ts';
 import { type Judgement, judgeRow } from './judge-row.ts';
 
@@ -12,9 +12,6 @@ export type JudgedRow = {
   /** An unusual value that has been asked about and kept. */
   isKept: boolean;
 };
-
-/** Only what can be recorded as it stands. */
-export type EntryValues = Readonly<Record<string, EntryValue>>;
 
 export type JudgedEntry = { rows: readonly JudgedRow[]; values: EntryValues };
 

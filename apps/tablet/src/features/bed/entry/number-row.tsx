@@ -55,8 +55,11 @@ export function NumberRowView({ row, judgedRow, entry, fault, now, timeZone, onN
 
   return (
     <div className="border-line border-b py-1.5 last:border-b-0">
-      <div className="grid grid-cols-[minmax(0,1fr)_auto_8rem] items-center gap-x-3">
-        <label htmlFor={id} className="flex min-h-12 flex-wrap items-center gap-x-2 text-lg leading-tight">
+      <div className="grid grid-cols-[minmax(0,1fr)_8rem] items-center gap-x-3 @xs:grid-cols-[minmax(0,1fr)_auto_8rem]">
+        <label
+          htmlFor={id}
+          className="col-span-2 flex min-h-8 @xs:col-span-1 @xs:min-h-12 flex-wrap items-center gap-x-2 text-lg leading-tight"
+        >
           <span>{row.label}</span>
           <span className="text-ink-muted text-sm">
             {row.field.unit}

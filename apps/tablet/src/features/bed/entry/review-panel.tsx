@@ -16,6 +16,7 @@ type ReviewPanelProps = {
   flags: Findings['flags'];
   verb: string;
   recording: Pick<Recording, 'state' | 'problem'>;
+  wasSent: boolean;
   onRecord: () => void;
   onBack: () => void;
 };
@@ -30,6 +31,7 @@ export function ReviewPanel({
   flags,
   verb,
   recording,
+  wasSent,
   onRecord,
   onBack,
 }: ReviewPanelProps) {
@@ -61,6 +63,11 @@ export function ReviewPanel({
         <FindingFlags flags={flags} />
       </div>
       <div className="sticky bottom-0 flex flex-col gap-2 bg-ground py-3">
+        {wasSent && recording.state === 'idle' && (
+          <Notice tone="attention" title="This was sent before, and no answer came">
+            <p>Send it again as it is: whatever became of it, it is recorded once.</p>
+          </Notice>
+        )}
         <RecordingWords recording={recording} />
         <div className="flex flex-wrap gap-3">
           <Button tone="main" className="min-h-16 px-8 text-lg" disabled={isSending} onClick={onRecord}>
@@ -125,7 +132,12 @@ function RecordingWords({ recording: { state, problem } }: Pick<ReviewPanelProps
           </p>
         </Notice>
       )}
-      {state === 'refused' && problem && (
+      {state === 'refused' && problem?.problem.status === 401 && (
+        <Notice tone="attention" title="Not recorded: your session had ended">
+          <p>What you typed is kept. You are signed in again, so record it now.</p>
+        </Notice>
+      )}
+      {state === 'refused' && problem && problem.problem.status !== 401 && (
         <Notice tone="attention" title={problem.problem.title}>
           <p>{problem.problem.detail} Nothing was recorded; what you typed is kept.</p>
         </Notice>

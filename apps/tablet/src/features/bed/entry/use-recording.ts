@@ -1,27 +1,32 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { NetworkError, ProblemError } from '@windrow/client/http';
-import { actKeys } from '@windrow/client/writes/act-key';
 import { keepBed } from '@windrow/client/writes/keep-bed';
 import { write } from '@windrow/client/writes/write';
 import type { Bed } from '@windrow/ventilation/contract/board';
-import { useEffect, useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 
 /** A fact answers with its bed, a transfer with both. */
 type Recorded = { bed?: Bed | null; beds?: Bed[] };
+
+/** One act: however often it is sent, under its key it is recorded once. */
+export type Act = { key: string; body: unknown };
 
 export type RecordingState = 'idle' | 'sending' | 'sending-again' | 'no-network' | 'refused';
 
 export type Recording = {
   state: RecordingState;
   problem: ProblemError | null;
-  send: (body: unknown) => void;
+  send: (act: Act) => void;
   reset: () => void;
 };
 
 const AGAIN_AFTER_MS = 8_000;
 
 /**
- * Sends one entry until it is answered, always under the key of its words.
+ * Sends one act until it is answered.
+ *
+ * @param onRecorded told whether the person is still on the page that it was sent from: who has gone on must
+ * not be called back. (The form itself may be gone: a transfer empties the very bed on whose page it stood.)
  */
 export function useRecording({
   path,
@@ -29,20 +34,19 @@ export function useRecording({
   onRefused,
 }: {
   path: string;
-  onRecorded: () => void;
+  onRecorded: (isHere: boolean) => void;
   onRefused: (problem: ProblemError) => void;
 }): Recording {
   const queryClient = useQueryClient();
-  const [keyOf] = useState(actKeys);
   const [isAgain, setAgain] = useState(false);
+  const sentFrom = useRef<string | null>(null);
 
   const mutation = useMutation({
-    mutationFn: (body: unknown) => {
-      return write<Recorded>({ method: 'POST', path, body, key: keyOf(body), onRetry: () => setAgain(true) });
-    },
+    mutationFn: ({ key, body }: Act) =>
+      write<Recorded>({ method: 'POST', path, body, key, onRetry: () => setAgain(true) }),
     onSuccess: async ({ bed, beds = bed ? [bed] : [] }) => {
       for (const changed of beds) await keepBed(queryClient, changed);
-      onRecorded();
+      onRecorded(window.location.pathname === sentFrom.current);
       await queryClient.invalidateQueries({ queryKey: ['record'] });
     },
     onError: (error) => {
@@ -54,7 +58,7 @@ export function useRecording({
 
   // It was decided once; the network alone is in the way, so it is not asked for again.
   useEffect(() => {
-    if (!isLost) return;
+    if (!isLost || !variables) return;
     const timer = setTimeout(() => mutate(variables), AGAIN_AFTER_MS);
     return () => clearTimeout(timer);
   }, [isLost, mutate, variables]);
@@ -67,9 +71,10 @@ export function useRecording({
       isRefused: error instanceof ProblemError,
     }),
     problem: error instanceof ProblemError ? error : null,
-    send: (body) => {
+    send: (act) => {
       setAgain(false);
-      mutate(body);
+      sentFrom.current = window.location.pathname;
+      mutate(act);
     },
     reset: mutation.reset,
   };

@@ -10,8 +10,14 @@ const HEAD = 'sticky left-0 bg-tile py-2 pr-2 text-left';
 /** What each unit has and needs, unit by unit and for the house, so that they can be compared along a line. */
 export function UnitsTable({ units, now }: { units: Units; now: number }) {
   return (
-    <section aria-label="Units in counts" className="overflow-x-auto rounded-xl bg-tile px-4 pb-2">
-      <table className="w-full">
+    // A house of many units is wider than a phone: it scrolls in its frame, which the keyboard must reach.
+    <section
+      // biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolling region needs the focus to be scrolled by keys
+      tabIndex={0}
+      aria-label="Units in counts"
+      className="overflow-x-auto rounded-xl bg-tile px-3 pb-2 sm:px-4"
+    >
+      <table className="w-full text-sm sm:text-base">
         <caption className="sr-only">Beds, patients, ventilators and work by unit</caption>
         <thead>
           <tr className="border-ink border-b-2 align-bottom">
@@ -52,7 +58,7 @@ export function UnitsTable({ units, now }: { units: Units; now: number }) {
 
 function Column({ words }: { words: string }) {
   return (
-    <th scope="col" className="max-w-28 py-2 pl-3 text-right font-bold">
+    <th scope="col" className="max-w-28 py-2 pl-2 text-right sm:pl-3 font-bold">
       {words}
     </th>
   );
@@ -76,16 +82,20 @@ function MeasureRow({ measure: { words, of }, units }: { measure: Measure; units
 /** A nought recedes, so that what there is stands out. */
 function CountCell({ count }: { count: number }) {
   return (
-    <td className={`py-2 pl-3 text-right text-lg ${count > 0 ? 'font-bold' : 'text-ink-muted'}`}>{count}</td>
+    <td
+      className={`py-2 pl-2 text-right sm:pl-3 text-base sm:text-lg ${count > 0 ? 'font-bold' : 'text-ink-muted'}`}
+    >
+      {count}
+    </td>
   );
 }
 
 function AgeCell({ of, now }: { of: Units; now: number }) {
   const at = oldestCheck(of);
-  if (at === null) return <td className="py-2 pl-3 text-right text-ink-muted">none</td>;
+  if (at === null) return <td className="py-2 pl-2 text-right sm:pl-3 text-ink-muted">none</td>;
   const minutes = (now - at) / 60_000;
   return (
-    <td className="py-2 pl-3 text-right text-ink-muted">
+    <td className="py-2 pl-2 text-right sm:pl-3 text-ink-muted">
       <span aria-hidden="true">{formatAge(minutes)}</span>
       <span className="sr-only">{ageInWords(minutes)}</span>
     </td>

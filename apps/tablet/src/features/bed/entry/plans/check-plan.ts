@@ -7,9 +7,8 @@ import {
 } from '@windrow/ventilation/entry/fields';
 import { SUPPORT_CATALOGUE, type SupportEntry } from '@windrow/ventilation/support/catalogue';
 import { flagOf, pick } from '../entry-body.ts';
-import type { EntrySection } from '../entry-field.ts';
+import type { EntrySection, EntryValues } from '../entry-field.ts';
 import type { EntryPlan } from '../entry-plan.ts';
-import type { EntryValues } from '../judge-entry.ts';
 import { choiceRow, type Earlier, NOTE_SECTION, numberRow, optionsOf, YES_NO } from '../rows.ts';
 import { MASK_WORDS } from '../words.ts';
 
