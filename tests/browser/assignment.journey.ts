@@ -1,5 +1,14 @@
 import type { Page } from '@playwright/test';
-import { expect, expectAccessible, LANDSCAPE, PORTRAIT, signIn, test, WALL, type Windrow } from './windrow.ts';
+import {
+  expect,
+  expectAccessible,
+  LANDSCAPE,
+  PORTRAIT,
+  signIn,
+  test,
+  WALL,
+  type Windrow,
+} from './windrow.ts';
 
 async function openAssignment(page: Page, windrow: Windrow): Promise<void> {
   await signIn(page, windrow, 'charge');
@@ -14,7 +23,10 @@ for (const [held, size] of [
   ['landscape', LANDSCAPE],
   ['portrait', PORTRAIT],
 ] as const) {
-  test(`the charge therapist (${held}) moves two beds, one by drag and one by menu, and the wall follows`, async ({ windrow, open }) => {
+  test(`the charge therapist (${held}) moves two beds, one by drag and one by menu, and the wall follows`, async ({
+    windrow,
+    open,
+  }) => {
     const wall = await open(windrow, WALL);
     await signIn(wall, windrow, 'display', '/wall');
     await wall.getByRole('button', { name: /Harbour ICU/ }).click();
@@ -59,10 +71,15 @@ test('a bed is moved by keyboard alone, and undone', async ({ windrow, open }) =
   await desk.keyboard.press('Enter');
   await expect(bedsOf(desk, 'Tove Ravn').getByRole('button', { name: /^Bed 15,/ })).toBeVisible();
   await desk.getByRole('button', { name: 'Undo' }).press('Enter');
-  await expect(desk.getByRole('list', { name: 'Beds that nobody has' }).getByRole('button', { name: /^Bed 15,/ })).toBeVisible();
+  await expect(
+    desk.getByRole('list', { name: 'Beds that nobody has' }).getByRole('button', { name: /^Bed 15,/ }),
+  ).toBeVisible();
 });
 
-test('two charge therapists at once: the second is told who was first, and neither loses a move', async ({ windrow, open }) => {
+test('two charge therapists at once: the second is told who was first, and neither loses a move', async ({
+  windrow,
+  open,
+}) => {
   const [first, second] = [await open(windrow, LANDSCAPE), await open(windrow, LANDSCAPE)];
   for (const desk of [first, second]) await openAssignment(desk, windrow);
 

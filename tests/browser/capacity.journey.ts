@@ -3,7 +3,10 @@ import { expect, expectAccessible, LANDSCAPE, PORTRAIT, signIn, test } from './w
 
 const PHONE = { width: 390, height: 844 };
 
-test('the free count goes down when a machine is taken into use at a bed, without a reload', async ({ windrow, open }) => {
+test('the free count goes down when a machine is taken into use at a bed, without a reload', async ({
+  windrow,
+  open,
+}) => {
   const house = await open(windrow, PORTRAIT);
   await signIn(house, windrow, 'supervisor');
   const answer = house.getByRole('heading', { level: 2, name: /adult ventilators are ready/ });
@@ -27,11 +30,16 @@ test('the supervisor moves a machine on from cleaning, on a phone', async ({ win
   await expectAccessible(phone);
   await phone.getByRole('link', { name: 'Every machine' }).tap();
   await phone.getByRole('combobox', { name: 'State' }).selectOption('cleaning');
-  await phone.getByRole('button', { name: /Adult intensive care/ }).first().tap();
+  await phone
+    .getByRole('button', { name: /Adult intensive care/ })
+    .first()
+    .tap();
   await expectAccessible(phone);
   await phone.getByRole('radio', { name: 'ready' }).check();
-  await phone.getByRole('button', { name: /^Move/ }).tap();
+  await phone.getByRole('button', { name: 'Record: ready' }).tap();
   await expect(phone.getByRole('dialog')).toBeHidden();
   await phone.getByRole('link', { name: 'House' }).tap();
-  await expect(phone.getByRole('heading', { level: 2, name: /^Yes\. 7 adult ventilators are ready/ })).toBeVisible();
+  await expect(
+    phone.getByRole('heading', { level: 2, name: /^Yes\. 7 adult ventilators are ready/ }),
+  ).toBeVisible();
 });

@@ -60,11 +60,15 @@ export function takeSession(queryClient: QueryClient, session: Session): boolean
   return isSame;
 }
 
+/** What the sign-in page itself reads. */
+const OF_NOBODY: readonly unknown[] = [SESSION_KEY[0], 'start'];
+
 /** After a sign-out that was meant: nothing of this person stays on the device. */
 export function dropSession(queryClient: QueryClient): void {
   held = null;
   clearAllDrafts();
-  queryClient.clear();
   queryClient.setQueryData(SESSION_KEY, null);
+  queryClient.removeQueries({ predicate: ({ queryKey }) => !OF_NOBODY.includes(queryKey[0]) });
+  queryClient.getMutationCache().clear();
   setOver(false);
 }

@@ -1,10 +1,11 @@
 import { useLive } from '@windrow/client/live/use-live';
 import { NoticeHost } from '@windrow/ui/controls/notice-host';
 import type { Session } from '@windrow/ventilation/contract/session';
-import { Outlet, useNavigation } from 'react-router-dom';
+import { Outlet, useLocation, useNavigation } from 'react-router-dom';
 import { useBedsidePages } from './bedside-pages.ts';
 import { useCurrentUnit } from './current-unit.ts';
 import { LiveBanner } from './live-banner.tsx';
+import { pageTitle } from './page-title.ts';
 import { useSessionOver } from './session-state.ts';
 import { ShellFooter } from './shell-footer.tsx';
 import { ShellHeader } from './shell-header.tsx';
@@ -17,11 +18,13 @@ export function Shell({ session }: { session: Session }) {
   const isOver = useSessionOver();
   const isFetching = useNavigation().state === 'loading';
   const { state } = useLive();
+  const { pathname } = useLocation();
   useTheme(unit);
   useBedsidePages(session);
 
   return (
     <>
+      <title>{pageTitle({ pathname, unitName: unit?.name ?? null })}</title>
       <div
         inert={isOver}
         data-live={state}

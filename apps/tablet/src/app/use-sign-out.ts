@@ -25,8 +25,8 @@ export function useSignOut(): { leave: () => Promise<void>; fault: string | null
       }
     }
     setFault(null);
-    await navigate('/');
     dropSession(queryClient);
+    await navigate('/');
   };
   return { leave, fault, forget: useCallback(() => setFault(null), []) };
 }

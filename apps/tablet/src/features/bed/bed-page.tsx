@@ -9,12 +9,13 @@ import { type ShownBed, shownBed } from '@windrow/ventilation/board/shown-bed';
 import { withdrawAll } from '@windrow/ventilation/board/withdraw-all';
 import type { Bed, Board } from '@windrow/ventilation/contract/board';
 import type { Session } from '@windrow/ventilation/contract/session';
+import { useState } from 'react';
 import { Outlet, useParams } from 'react-router-dom';
 import type { BedContext } from './bed-context.ts';
 import { BedHeader } from './bed-header.tsx';
 import { BedTabs } from './bed-tabs.tsx';
 import { EmptyBed } from './empty-bed.tsx';
-import { SamePatient } from './same-patient.tsx';
+import { PatientGone } from './patient-gone.tsx';
 
 /** One bed: who lies there, and the tabs of what is known and what can be recorded. */
 export function BedPage() {
@@ -33,9 +34,15 @@ export function BedPage() {
 function OneBed({ board, bed, session }: { board: Board; bed: Bed; session: Session }) {
   const now = useNow();
   const { state } = useLive();
+  const [opened, setOpened] = useState(bed.stay);
   const aged = shownBed({ bed, now });
   const shown: ShownBed = state === 'withdrawn' ? withdrawAll(aged) : aged;
   const { stay } = shown.bed;
+  // Opened on an empty bed, the page is for whoever comes into it first.
+  if (opened === null && bed.stay !== null) setOpened(bed.stay);
+  if (opened !== null && opened.stayId !== stay?.stayId) {
+    return <PatientGone opened={opened} bed={bed} board={board} onRead={() => setOpened(bed.stay)} />;
+  }
   if (!stay || !bed.stay) return <EmptyBed bed={bed} grants={session.grants} />;
 
   const context: BedContext = {
@@ -50,10 +57,8 @@ function OneBed({ board, bed, session }: { board: Board; bed: Bed; session: Sess
   return (
     <div className="mx-auto flex w-full max-w-7xl grow flex-col gap-3">
       <BedHeader shown={shown} stay={stay} now={now} timeZone={board.unit.timeZone} />
-      <SamePatient stay={stay} bedLabel={bed.label}>
-        <BedTabs bed={bed} stayId={stay.stayId} grants={session.grants} />
-        <Outlet context={context} />
-      </SamePatient>
+      <BedTabs bed={bed} stayId={stay.stayId} grants={session.grants} />
+      <Outlet key={stay.stayId} context={context} />
     </div>
   );
 }

@@ -46,7 +46,8 @@ export function BedRow({ shown, stay, now, timeZone, isUnfinished }: BedRowProps
 function RowValues({ shown, stay, now, timeZone }: Pick<BedRowProps, 'shown' | 'stay' | 'now' | 'timeZone'>) {
   const { state, observedAt } = shown.groups.check;
   if (stay.check === null) {
-    if (state === 'never') return <p className="text-ink-muted">no check yet</p>;
+    // That there is none yet is said below, as what is owed.
+    if (state === 'never') return null;
     return (
       <p className="rake-dense w-fit rounded-md p-2">
         <span className="rounded-sm bg-tile px-2 py-0.5 font-bold">

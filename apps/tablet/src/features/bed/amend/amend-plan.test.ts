@@ -22,7 +22,7 @@ function anEntry(kind: RecordEntry['kind'], body: Record<string, unknown>): Reco
 function amended(entry: RecordEntry, changes: Record<string, string>) {
   const values = { ...textsOf(entry.body), ...changes };
   const plan = amendPlan({ entry, values, ageMinutes: 100 });
-  const draft = { values, kept: {}, left: [], active: null, time: null, startedFrom: null };
+  const draft = { values, kept: {}, left: [], active: null, typing: null, time: null, startedFrom: null };
   return { plan, judged: judgeEntry({ plan, draft, weightKg: null }) };
 }
 

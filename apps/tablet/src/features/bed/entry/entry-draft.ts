@@ -13,6 +13,8 @@ export type EntryDraft = {
   left: readonly string[];
   /** The row that the keypad writes into. */
   active: string | null;
+  /** The row that was typed into since the keypad came to it: from then on digits are added, before that they replace. */
+  typing: string | null;
   time: TimeDraft;
   /** The fact that was the latest when this was begun; another since then is told. */
   startedFrom: string | null;
@@ -35,7 +37,10 @@ export const TIME_KEY = 'observedAt';
 export function reduceEntry(draft: EntryDraft, action: EntryAction): EntryDraft {
   switch (action.type) {
     case 'press':
-      return withText(draft, action.row.key, pressed(draft, action.row, action.key));
+      return {
+        ...withText(draft, action.row.key, pressed(draft, action.row, action.key)),
+        typing: action.row.key,
+      };
     case 'repeat':
       return withText(draft, action.row.key, repeated(action.row) ?? draft.values[action.row.key] ?? '');
     case 'set':
@@ -43,7 +48,7 @@ export function reduceEntry(draft: EntryDraft, action: EntryAction): EntryDraft 
     case 'focus':
       return draft.active === action.key
         ? draft
-        : { ...draft, active: action.key, left: leaving(draft, draft.active) };
+        : { ...draft, active: action.key, typing: null, left: leaving(draft, draft.active) };
     case 'leave':
       return { ...draft, left: leaving(draft, action.key) };
     case 'press-time':
@@ -70,8 +75,12 @@ export function isUntouched(draft: EntryDraft, initial: EntryDraft): boolean {
   return sameValues && isSameTime(draft.time, initial.time);
 }
 
+const CHANGES_WHAT_STANDS: readonly KeypadKey[] = ['plus', 'minus', 'erase', 'sign'];
+
+/** The first digit in a field that holds a number begins a new one: "33" over "39" is 33, never 3933. */
 function pressed(draft: EntryDraft, row: NumberRow, key: KeypadKey): string {
-  const text = draft.values[row.key] ?? '';
+  const begins = draft.typing !== row.key && !CHANGES_WHAT_STANDS.includes(key);
+  const text = begins ? '' : (draft.values[row.key] ?? '');
   return pressKey({ text, key, field: row.field, from: stepStart(row) });
 }
 

@@ -20,7 +20,7 @@ const earlier = (key: string) => LAST[key] ?? NOTHING_BEFORE;
 const observedAt = Date.parse('2026-03-05T11:20:00Z');
 
 function draftOf(values: Record<string, string>, kept: Record<string, string> = {}): EntryDraft {
-  return { values, kept, left: [], active: null, time: null, startedFrom: null };
+  return { values, kept, left: [], active: null, typing: null, time: null, startedFrom: null };
 }
 
 const VALID = { mode: 'ac-vc', vtSetMl: '430', rateSetPerMin: '18', peepCmH2O: '10', fio2Percent: '0.45' };
@@ -152,6 +152,22 @@ describe('a draft', () => {
     expect(empty.values.peepCmH2O).toBeUndefined();
     expect(reduceEntry(empty, { type: 'repeat', row }).values.peepCmH2O).toBe('8');
     expect(reduceEntry(empty, { type: 'press', row, key: 'plus' }).values.peepCmH2O).toBe('9');
+  });
+
+  it('begins a new number with the first digit in a field that is come back to', () => {
+    const row = rowOf('peepCmH2O');
+    const typed = [
+      { type: 'focus', key: 'peepCmH2O' },
+      { type: 'press', row, key: '1' },
+      { type: 'press', row, key: '2' },
+      { type: 'focus', key: 'rateSetPerMin' },
+      { type: 'focus', key: 'peepCmH2O' },
+    ] as const;
+    const back = typed.reduce(reduceEntry, draftOf({}));
+    expect(back.values.peepCmH2O).toBe('12');
+    expect(reduceEntry(back, { type: 'press', row, key: '8' }).values.peepCmH2O).toBe('8');
+    expect(reduceEntry(back, { type: 'press', row, key: 'plus' }).values.peepCmH2O).toBe('13');
+    expect(reduceEntry(back, { type: 'press', row, key: 'erase' }).values.peepCmH2O).toBe('1');
   });
 
   it('offers nothing to take over once the value is withdrawn', () => {

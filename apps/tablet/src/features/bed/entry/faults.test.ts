@@ -17,7 +17,7 @@ function faults(
     refusals = {},
   }: Partial<EntryDraft> & { wasTried?: boolean; refusals?: Parameters<typeof faultsOf>[0]['refusals'] } = {},
 ) {
-  const draft: EntryDraft = { values, kept: {}, left, active, time: null, startedFrom: null };
+  const draft: EntryDraft = { values, kept: {}, left, active, typing: null, time: null, startedFrom: null };
   return faultsOf({
     judged: judgeEntry({ plan, draft, weightKg: null }),
     draft,
@@ -52,7 +52,15 @@ describe('refusalsOf', () => {
   it('keeps what belongs to no row for the entry as a whole', () => {
     const judged = judgeEntry({
       plan,
-      draft: { values: { ph: '7.4' }, kept: {}, left: [], active: null, time: null, startedFrom: null },
+      draft: {
+        values: { ph: '7.4' },
+        kept: {},
+        left: [],
+        active: null,
+        typing: null,
+        time: null,
+        startedFrom: null,
+      },
       weightKg: null,
     });
     const errors = [

@@ -47,12 +47,13 @@ export function useEntry({
     kept: {},
     left: [],
     active: null,
+    typing: null,
     time: initialTime,
     startedFrom: latestId,
   }));
   const [draft, dispatch] = useReducer(reduceEntry, initial, (fresh) => {
     const kept = entryDrafts.get(draftKey);
-    return kept ? { ...kept, active: null } : fresh;
+    return kept ? { ...kept, active: null, typing: null } : fresh;
   });
   const untouched = isUntouched(draft, initial);
 

@@ -29,7 +29,7 @@ export function FlagList({ flags }: { flags: readonly Flag[] }) {
 function Why({ flag }: { flag: Flag }) {
   return (
     <details className="w-full">
-      <summary className="flex min-h-12 w-fit cursor-pointer items-center font-bold underline">
+      <summary className="flex min-h-12 w-fit min-w-12 cursor-pointer items-center font-bold underline">
         Why<span className="sr-only">: {flag.short}</span>
       </summary>
       <dl className="grid grid-cols-[auto_auto] justify-start gap-x-4">
