@@ -25,7 +25,7 @@ test('an empty house is set up from its first administrator to a therapist who s
   await desk.getByRole('dialog').getByRole('button', { name: 'Add', exact: true }).click();
   await expect(desk.getByRole('button', { name: /^Bed 01, open/ })).toBeVisible();
 
-  await desk.getByRole('link', { name: 'People' }).click();
+  await desk.getByRole('link', { name: 'People', exact: true }).click();
   await desk
     .getByRole('button', { name: /^Add (a person|somebody)/ })
     .first()

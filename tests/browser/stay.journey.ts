@@ -52,11 +52,11 @@ test('a stay from admission to its end: admitted, a gas with a slip, the slip am
     .getByRole('link', { name: /^Amend/ })
     .first()
     .tap();
-  await tablet.getByRole('textbox', { name: /reason/i }).fill('typed 7.12 for 7.42');
+  await tablet.getByRole('textbox', { name: /^Why it is amended/ }).fill('typed 7.12 for 7.42');
   await enter(tablet, 'pH', '7.42');
   await expectAccessible(tablet);
   await tablet.getByRole('button', { name: /^Review/ }).tap();
-  await tablet.getByRole('button', { name: /^(Record|Amend)/ }).tap();
+  await tablet.getByRole('button', { name: 'Amend', exact: true }).tap();
   await expect(tile('04')).toContainText('7.42');
   await openPart(tablet, 'Record');
   await expect(tablet.getByRole('main')).toContainText('7.12');
@@ -67,6 +67,6 @@ test('a stay from admission to its end: admitted, a gas with a slip, the slip am
   await tablet.getByRole('radio', { name: 'To a ward' }).check();
   await tablet.getByRole('button', { name: 'Review and end the stay' }).tap();
   await expectAccessible(tablet);
-  await tablet.getByRole('button', { name: /^End the stay/ }).tap();
+  await tablet.getByRole('button', { name: 'End the stay', exact: true }).tap();
   await expect(tile('04')).toContainText('empty');
 });
