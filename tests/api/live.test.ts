@@ -83,8 +83,8 @@ describe('a beat', () => {
       last = performance.now();
     }
     // The first wait begins anywhere between two beats; the second is one whole.
-    expect(waits[1]).toBeGreaterThan(BEAT_EVERY_MS * 0.8);
-    expect(waits[1]).toBeLessThan(BEAT_EVERY_MS * 1.5);
+    expect(waits[1]).toBeGreaterThan(BEAT_EVERY_MS * 0.5);
+    expect(waits[1]).toBeLessThan(BEAT_EVERY_MS * 2);
     expect(units(therapist)).toEqual(new Set([house.alder.unitId]));
   });
 
@@ -155,10 +155,11 @@ describe('a changed bed', () => {
     await screen.until(({ beds }) => beds.length >= 1);
     for (let n = 0; n < 10; n += 1) {
       const told = screen.until(({ beds }) => beds.length >= n + 2);
-      void house.record(stayId, 'checks', aCheck(house.ago(10 - n)));
+      const recording = house.record(stayId, 'checks', aCheck(house.ago(10 - n)));
       const { beds } = await told;
       const board = await house.board(house.alder);
       expect(board.revision).toBeGreaterThanOrEqual(beds.at(-1)?.revision ?? Number.POSITIVE_INFINITY);
+      await recording;
     }
   });
 

@@ -79,6 +79,10 @@ describe.each(keys)('%s', (key) => {
     else {
       expect(reply.status).toBe(401);
       expect(isSame).toBe(true);
+      // Nor is a wrong request told what is wrong with it.
+      const [method = '', path = ''] = key.split(' ');
+      const wrong = method === 'GET' ? {} : { body: { colour: 'blue' }, key: null };
+      expect((await scene.house.anybody().ask(method, path, wrong)).status).toBe(401);
     }
   });
 });

@@ -76,6 +76,9 @@ describe('a check recorded at the bedside', () => {
     expect((await stayOnBoard(stayId)).gas?.changedSinceAt).toBeNull();
     await house.record(stayId, 'checks', aCheck(house.ago(60), { settings: { peepCmH2O: 12 } }));
     expect((await stayOnBoard(stayId)).gas?.changedSinceAt).toBe(house.ago(60));
+    // The first change is the one that counts, whatever was changed after it.
+    await house.record(stayId, 'checks', aCheck(house.ago(40), { settings: { peepCmH2O: 14 } }));
+    expect((await stayOnBoard(stayId)).gas?.changedSinceAt).toBe(house.ago(60));
   });
 
   it('recorded late about an earlier time does not replace what was observed after it', async () => {
@@ -83,6 +86,15 @@ describe('a check recorded at the bedside', () => {
     const { observationId } = await house.record(stayId, 'checks', aCheck(house.ago(10)));
     await house.record(stayId, 'checks', aCheck(house.ago(30), { settings: { peepCmH2O: 5 } }));
     expect((await stayOnBoard(stayId)).check).toMatchObject({ observationId, settings: { peepCmH2O: 10 } });
+  });
+});
+
+describe('two checks of one minute', () => {
+  it('are shown in the order in which they were recorded: the later one counts', async () => {
+    const stayId = await stayInBed(0);
+    await house.record(stayId, 'checks', aCheck(house.ago(0)));
+    const { observationId } = await house.record(stayId, 'checks', aCheck(house.ago(0)));
+    expect((await stayOnBoard(stayId)).check?.observationId).toBe(observationId);
   });
 });
 

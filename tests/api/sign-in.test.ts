@@ -95,7 +95,7 @@ describe('signing in', () => {
     await tablet.signIn('charge', PASSWORD);
     expect((await tablet.get('/api/session')).as(Session).person.username).toBe('charge');
     expect((await before.get('/api/session')).status).toBe(401);
-    expect(await screen.ended).toBe('io server disconnect');
+    expect(await screen.ended()).toBe('io server disconnect');
   });
 });
 
@@ -208,7 +208,7 @@ describe('a session', () => {
       attributes: expect.arrayContaining(['Max-Age=0']),
     });
     expect((await copy.get('/api/session')).status).toBe(401);
-    for (const screen of screens) expect(await screen.ended).toBe('io server disconnect');
+    for (const screen of screens) expect(await screen.ended()).toBe('io server disconnect');
     expect(other.isOpen).toBe(true);
     other.close();
   });
@@ -224,7 +224,7 @@ describe('a session', () => {
     const changed = await house.as('administrator').patch(path, change, { version: 1 });
     expect(changed.as(Person).version).toBe(2);
     expect((await house.as('therapist').get('/api/session')).status).toBe(401);
-    expect(await screen.ended).toBe('io server disconnect');
+    expect(await screen.ended()).toBe('io server disconnect');
     await expect(listen(house.as('therapist'))).rejects.toThrow('not signed in');
   });
 

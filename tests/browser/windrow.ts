@@ -91,21 +91,21 @@ type Fixtures = {
 
 export const test = base.extend<Fixtures>({
   // biome-ignore lint/correctness/noEmptyPattern: Playwright reads the fixture's needs from this pattern
-  windrow: async ({}, use) => {
+  windrow: async ({}, provide) => {
     const windrow = await Windrow.start({ demo: true });
-    await use(windrow);
+    await provide(windrow);
     await windrow.dispose();
   },
   // biome-ignore lint/correctness/noEmptyPattern: Playwright reads the fixture's needs from this pattern
-  emptyWindrow: async ({}, use) => {
+  emptyWindrow: async ({}, provide) => {
     const windrow = await Windrow.start({ demo: false });
-    await use(windrow);
+    await provide(windrow);
     await windrow.dispose();
   },
-  open: async ({ browser }, use) => {
+  open: async ({ browser }, provide) => {
     const faults: string[] = [];
     const contexts: Awaited<ReturnType<typeof browser.newContext>>[] = [];
-    await use(async (where, size) => {
+    await provide(async (where, size) => {
       const context = await browser.newContext({ viewport: size, hasTouch: true });
       contexts.push(context);
       const page = await context.newPage();

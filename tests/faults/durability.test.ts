@@ -1,5 +1,6 @@
 import { join } from 'node:path';
 import { Session } from '@windrow/ventilation/contract/session';
+import { Shift } from '@windrow/ventilation/contract/shifts';
 import type { Knex } from 'knex';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { migrateDatabase, openDatabase } from '../../apps/server/src/queries/database.ts';
@@ -133,7 +134,7 @@ describe('what was recorded', () => {
       endsAt: house.ago(-60),
       people: [{ personId: house.personId('therapist'), minutesAvailable: 60 }],
     });
-    const { shiftId } = made.body as { shiftId: string };
+    const { shiftId } = made.as(Shift);
     await house
       .as('charge')
       .put(`/api/shifts/${shiftId}/assignment`, { places: [], publish: true }, { version: 0 });

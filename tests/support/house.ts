@@ -1,9 +1,12 @@
+import { randomUUID } from 'node:crypto';
 import { Bed, Board, Unit } from '@windrow/ventilation/contract/board';
 import { Ventilator } from '@windrow/ventilation/contract/fleet';
-import { Person, PolicyVersion } from '@windrow/ventilation/contract/setup';
+import { PolicyVersion } from '@windrow/ventilation/contract/setup';
 import type { Grant } from '@windrow/ventilation/permissions/permissions';
 import type { DestinationStream } from 'pino';
 import { readSettings } from '../../apps/server/src/config/settings.ts';
+import type { Deps } from '../../apps/server/src/deps.ts';
+import { insertPerson, replaceGrants } from '../../apps/server/src/queries/people.ts';
 import { startServer } from '../../apps/server/src/start-server.ts';
 import { Caller } from './caller.ts';
 import { anAdmission } from './entries.ts';
@@ -11,13 +14,20 @@ import { listOf, Placed, Recorded, RecordPage } from './shapes.ts';
 
 export const PASSWORD = 'correct horse battery';
 
+/** Made once: hashing a password is slow on purpose, and the houses of a file need it for the same one. */
+let hashed: Promise<string> | undefined;
+function passwordHash({ signIns }: Deps): Promise<string> {
+  hashed ??= signIns.hashPassword(PASSWORD);
+  return hashed;
+}
+
 export type HouseUnit = { unitId: string; bedIds: string[] };
 export type House = Awaited<ReturnType<typeof openHouse>>;
 type Opening = { database?: string; origin?: string; logTo?: DestinationStream };
 
 /**
  * A small house with a real server on a free port and a real database: units Alder (four beds) and Birch
- * (two), and everybody that the roles name. `clock` is the server's, and can be set.
+ * (two), and everybody that the roles name, signed in. `clock` is the server's, and can be set.
  */
 export async function openHouse({ database = ':memory:', origin, logTo }: Opening = {}) {
   const clock = { now: new Date('2026-03-05T08:00:00.000Z') };
@@ -46,16 +56,22 @@ export async function openHouse({ database = ':memory:', origin, logTo }: Openin
 
   const people = new Map<string, { personId: string; caller: Caller }>();
   const addPerson = async (username: string, grants: Grant[]) => {
-    const added = await admin.post('/api/people', {
-      username,
-      displayName: `Person ${username}`,
-      initials: username.slice(0, 2),
-      password: PASSWORD,
-      grants,
+    const personId = randomUUID();
+    await deps.db.transaction(async (trx) => {
+      await insertPerson(trx, {
+        id: personId,
+        username,
+        display_name: `Person ${username}`,
+        initials: username.slice(0, 2).toUpperCase(),
+        password_hash: await passwordHash(deps),
+        disabled_at: null,
+        version: 1,
+      });
+      await replaceGrants(trx, personId, grants);
     });
-    const caller = new Caller(url);
-    await caller.signIn(username, PASSWORD);
-    people.set(username, { personId: added.as(Person).personId, caller });
+    const { cookie } = await deps.signIns.open(personId);
+    const caller = new Caller(url, cookie.split(';')[0]);
+    people.set(username, { personId, caller });
     return caller;
   };
 

@@ -8,7 +8,7 @@ type Heard = { beats: Beat[]; beds: BedChanged[]; changed: Changed[]; raw: strin
 /** An open screen that writes down everything it is told. */
 export class Listener {
   readonly heard: Heard = { beats: [], beds: [], changed: [], raw: [] };
-  readonly ended: Promise<string>;
+  private readonly end: Promise<string>;
   private readonly waiting = new Set<() => void>();
 
   constructor(private readonly socket: Socket<ServerToClient>) {
@@ -17,7 +17,7 @@ export class Listener {
     socket.on('beat', (beat) => this.note(() => heard.beats.push(beat)));
     socket.on('bed', (changed) => this.note(() => heard.beds.push(changed)));
     socket.on('changed', (changed) => this.note(() => heard.changed.push(changed)));
-    this.ended = new Promise((resolve) => socket.once('disconnect', resolve));
+    this.end = new Promise((resolve) => socket.once('disconnect', resolve));
   }
 
   private note(keep: () => unknown): void {
@@ -26,7 +26,7 @@ export class Listener {
   }
 
   /** Waits until what was heard is enough; fails, and says what was heard, when it never is. */
-  async until(isEnough: (heard: Heard) => boolean, withinMs = 3_000): Promise<Heard> {
+  async until(isEnough: (heard: Heard) => boolean, withinMs = 5_000): Promise<Heard> {
     await new Promise<void>((resolve, reject) => {
       const look = () => {
         if (!isEnough(this.heard)) return;
@@ -44,6 +44,14 @@ export class Listener {
       look();
     });
     return this.heard;
+  }
+
+  /** Why the server ended it; fails when it did not soon, and leaves no time for the check that comes by every half minute. */
+  ended(withinMs = 5_000): Promise<string> {
+    const late = new Promise<string>((_, reject) => {
+      setTimeout(() => reject(new Error(`still open after ${withinMs} ms`)), withinMs).unref();
+    });
+    return Promise.race([this.end, late]);
   }
 
   /** Forgets what was said on the way in. */
