@@ -169,10 +169,9 @@ function tellRooms(deps: Deps, io: Sockets, { beds, changed, dropped }: Tell): v
     }
   }
   for (const event of changed) {
+    // Shifts are their unit's affair; the rest is also told to those who set a unit up and hear no beds of it.
     const rooms =
-      event.topic === 'fleet' || event.topic === 'units' || event.unitId === null
-        ? [HOUSE_ROOM]
-        : [unitRoom(event.unitId, 'staff'), unitRoom(event.unitId, 'display')];
+      event.topic === 'shifts' && event.unitId !== null ? [unitRoom(event.unitId, 'staff')] : [HOUSE_ROOM];
     io.to(rooms).emit('changed', event);
   }
   if (changed.some(({ topic }) => topic === 'units')) {

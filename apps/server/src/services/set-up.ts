@@ -231,9 +231,12 @@ export async function makeFirstAdministrator(
   deps: Deps,
   { username, displayName, password }: FirstAdministrator,
 ): Promise<string> {
+  const alreadyThere = () => conflict('This house has its administrator already. Sign in instead.');
+  // Open to anybody, so nothing slow is done for those who come too late.
+  if (await anyPerson(deps.db)) throw alreadyThere();
   const passwordHash = await deps.signIns.hashPassword(password);
   return deps.db.transaction(async (trx) => {
-    if (await anyPerson(trx)) throw conflict('This house has its administrator already. Sign in instead.');
+    if (await anyPerson(trx)) throw alreadyThere();
     const id = randomUUID();
     const initials = displayName
       .split(/\s+/)

@@ -184,7 +184,7 @@ export const AirwayCheck = z
   );
 export type AirwayCheck = z.infer<typeof AirwayCheck>;
 
-/** Points in time that change the course. Those with `support` also change what the patient breathes with. */
+/** Points in time that change what comes next. Those with `support` also change what the patient breathes with. */
 export const HAPPENING_KINDS = {
   intubated: { label: 'Intubated', support: false },
   'extubated-planned': { label: 'Extubated, planned', support: true },

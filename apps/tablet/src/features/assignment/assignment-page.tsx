@@ -1,18 +1,19 @@
 import { useQuery } from '@tanstack/react-query';
 import { boardQuery, unitsQuery } from '@windrow/client/board/board-queries';
+import { policyQuery } from '@windrow/client/board/policy-query';
 import { useNow } from '@windrow/client/clock/use-now';
 import { sessionQuery } from '@windrow/client/session/session';
+import { Reading } from '@windrow/ui/controls/reading';
 import { EmptyState, ErrorState } from '@windrow/ui/controls/states';
 import type { Unit } from '@windrow/ventilation/contract/board';
 import type { Shift } from '@windrow/ventilation/contract/shifts';
 import { may } from '@windrow/ventilation/permissions/permissions';
 import { useParams, useSearchParams } from 'react-router-dom';
 import { AssignmentDesk } from './assignment-desk.tsx';
-import { Reading } from './reading.tsx';
 import { newestFirst, shiftToOpen } from './shift/pick-shift.ts';
 import { ShiftBar } from './shift/shift-bar.tsx';
 import { ShiftForm } from './shift/shift-form.tsx';
-import { assignmentQuery, policyQuery, shiftsQuery } from './shift-queries.ts';
+import { assignmentQuery, shiftsQuery } from './shift-queries.ts';
 
 /** Who has which bed in a shift: divided by the charge therapist, seen by all who work with it. */
 export function AssignmentPage() {

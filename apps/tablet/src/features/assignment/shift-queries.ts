@@ -1,6 +1,5 @@
 import { queryOptions } from '@tanstack/react-query';
 import { getJson } from '@windrow/client/http';
-import type { PolicyVersion } from '@windrow/ventilation/contract/setup';
 import type { Assignment, Colleague, Shift } from '@windrow/ventilation/contract/shifts';
 
 /** What the live link may have missed while it was cut is found again within this time. */
@@ -41,14 +40,5 @@ export function colleaguesQuery(unitId: string) {
     queryKey: ['colleagues', unitId],
     queryFn: ({ signal }) =>
       getJson<{ items: Colleague[] }>(`/api/units/${encodeURIComponent(unitId)}/colleagues`, { signal }),
-  });
-}
-
-/** The unit's policy, which prices the tasks. The live link says when it changes. */
-export function policyQuery(unitId: string) {
-  return queryOptions({
-    queryKey: ['policy', unitId],
-    queryFn: ({ signal }) =>
-      getJson<PolicyVersion>(`/api/units/${encodeURIComponent(unitId)}/policy`, { signal }),
   });
 }

@@ -3,7 +3,7 @@ import { useNavigate } from 'react-router-dom';
 import { useBed } from './bed-context.ts';
 import { EntryForm } from './entry/entry-form.tsx';
 import type { EntryPlan } from './entry/entry-plan.ts';
-import { useThresholds } from './policy-query.ts';
+import { useThresholds } from './use-thresholds.ts';
 
 /** A form whose answers become a new fact of this stay. */
 export function RecordingForm({

@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { unitsQuery } from '@windrow/client/board/board-queries';
 import { useNow } from '@windrow/client/clock/use-now';
 import { sessionQuery } from '@windrow/client/session/session';
+import { Reading } from '@windrow/ui/controls/reading';
 import { SegmentedTabs, segmentClass } from '@windrow/ui/controls/segmented-tabs';
 import type { Capacity } from '@windrow/ventilation/contract/fleet';
 import type { Grant } from '@windrow/ventilation/permissions/permissions';
@@ -11,7 +12,6 @@ import { countState } from './answer/count-age.ts';
 import { capacityQuery } from './capacity-queries.ts';
 import { FleetPart } from './fleet/fleet-part.tsx';
 import { HousePart } from './house/house-part.tsx';
-import { Reading } from './reading.tsx';
 
 const SECONDS_MS = 5_000;
 

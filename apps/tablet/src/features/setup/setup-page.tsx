@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { unitsQuery } from '@windrow/client/board/board-queries';
 import { sessionQuery } from '@windrow/client/session/session';
+import { Reading } from '@windrow/ui/controls/reading';
 import { SegmentedTabs, segmentClass } from '@windrow/ui/controls/segmented-tabs';
 import { EmptyState } from '@windrow/ui/controls/states';
 import type { Unit } from '@windrow/ventilation/contract/board';
@@ -9,7 +10,6 @@ import { Link, useSearchParams } from 'react-router-dom';
 import { FirstSteps } from './first-run/first-steps.tsx';
 import { PeoplePart } from './people/people-part.tsx';
 import { PolicyPart } from './policy/policy-part.tsx';
-import { Reading } from './reading.tsx';
 import { UnitsPart } from './units/units-part.tsx';
 
 const PARTS = [

@@ -1,9 +1,7 @@
 import { queryOptions } from '@tanstack/react-query';
 import { getJson } from '@windrow/client/http';
 import type { BedPlace } from '@windrow/ventilation/contract/board';
-import type { Person, PolicyVersion } from '@windrow/ventilation/contract/setup';
-
-const REREAD_EVERY_MS = 30_000;
+import type { Person } from '@windrow/ventilation/contract/setup';
 
 type Page<T> = { items: T[]; nextCursor: string | null };
 
@@ -42,22 +40,5 @@ export function bedsQuery(unitId: string) {
   return queryOptions({
     queryKey: bedsKey(unitId),
     queryFn: ({ signal }) => getJson<{ items: BedPlace[] }>(bedsPath(unitId), { signal }),
-  });
-}
-
-export function policyKey(unitId: string) {
-  return ['policy', unitId] as const;
-}
-
-export function policyPath(unitId: string) {
-  return `/api/units/${encodeURIComponent(unitId)}/policy`;
-}
-
-export function policyQuery(unitId: string) {
-  return queryOptions({
-    queryKey: policyKey(unitId),
-    queryFn: ({ signal }) => getJson<PolicyVersion>(policyPath(unitId), { signal }),
-    // Not everybody who may set a policy hears when somebody else does.
-    refetchInterval: REREAD_EVERY_MS,
   });
 }

@@ -7,7 +7,7 @@ import { Link, useLocation, useNavigate } from 'react-router-dom';
 import { useBed } from '../bed-context.ts';
 import { EntryForm } from '../entry/entry-form.tsx';
 import { struckPlan } from '../entry/plans/stay-plans.ts';
-import { useThresholds } from '../policy-query.ts';
+import { useThresholds } from '../use-thresholds.ts';
 import { amendPlan, isAmendable, textsOf } from './amend-plan.ts';
 
 type As = 'corrected' | 'struck';

@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { Button } from '@windrow/ui/controls/button';
+import { Reading } from '@windrow/ui/controls/reading';
 import { EmptyState } from '@windrow/ui/controls/states';
 import type { Ventilator } from '@windrow/ventilation/contract/fleet';
 import { type Grant, mayAnywhere } from '@windrow/ventilation/permissions/permissions';
@@ -9,7 +10,6 @@ import { fleetQuery } from '../capacity-queries.ts';
 import { AddMachine } from '../machine/add-machine.tsx';
 import { MachineDialog } from '../machine/machine-dialog.tsx';
 import type { UnitNames } from '../machine/place-words.ts';
-import { Reading } from '../reading.tsx';
 import { type FleetFilter, filterFleet, isWhole, WHOLE_FLEET } from './filter-fleet.ts';
 import { asClass, asState, FleetFilters } from './fleet-filters.tsx';
 import { FleetList } from './fleet-list.tsx';

@@ -1,10 +1,10 @@
 import { useQuery } from '@tanstack/react-query';
 import { boardQuery, unitsQuery } from '@windrow/client/board/board-queries';
+import { Reading } from '@windrow/ui/controls/reading';
 import { SelectField } from '@windrow/ui/controls/select-field';
 import type { Unit } from '@windrow/ventilation/contract/board';
 import { type Grant, may } from '@windrow/ventilation/permissions/permissions';
 import { useState } from 'react';
-import { Reading } from '../reading.tsx';
 import { bedsToChoose } from './beds-to-choose.ts';
 
 /** At which bed a machine is put to use. Beds on a ventilator by the record that have no machine yet come first. */

@@ -1,8 +1,8 @@
 import { useQuery } from '@tanstack/react-query';
+import { Reading } from '@windrow/ui/controls/reading';
 import { VENTILATOR_STATES } from '@windrow/ventilation/contract/fleet';
 import { formatMoment } from '@windrow/ventilation/format/clock';
 import { movesQuery } from '../capacity-queries.ts';
-import { Reading } from '../reading.tsx';
 import { placeInWords, type UnitNames } from './place-words.ts';
 
 /** Where a machine has been and who moved it, newest first. */

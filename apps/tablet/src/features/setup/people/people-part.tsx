@@ -1,11 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
 import { Button } from '@windrow/ui/controls/button';
+import { Reading } from '@windrow/ui/controls/reading';
 import { EmptyState } from '@windrow/ui/controls/states';
 import { TextField } from '@windrow/ui/controls/text-field';
 import type { Unit } from '@windrow/ventilation/contract/board';
 import type { Person } from '@windrow/ventilation/contract/setup';
 import { useState } from 'react';
-import { Reading } from '../reading.tsx';
 import { peopleQuery } from '../setup-queries.ts';
 import { NewPersonDialog } from './new-person-dialog.tsx';
 import { PersonDialog } from './person-dialog.tsx';

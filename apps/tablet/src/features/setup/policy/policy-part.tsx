@@ -1,9 +1,9 @@
 import { useQuery } from '@tanstack/react-query';
+import { policyQuery } from '@windrow/client/board/policy-query';
+import { Reading } from '@windrow/ui/controls/reading';
 import { EmptyState } from '@windrow/ui/controls/states';
 import type { Unit } from '@windrow/ventilation/contract/board';
 import { useSearchParams } from 'react-router-dom';
-import { Reading } from '../reading.tsx';
-import { policyQuery } from '../setup-queries.ts';
 import { UnitChoice } from '../unit-choice.tsx';
 import { PolicyForm } from './policy-form.tsx';
 

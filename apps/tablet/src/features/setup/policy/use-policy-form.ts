@@ -1,12 +1,12 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { policyKey, policyPath, policyQuery } from '@windrow/client/board/policy-query';
 import { write } from '@windrow/client/writes/write';
 import { announce } from '@windrow/ui/controls/notice-host';
 import { PolicyChange, type PolicyVersion } from '@windrow/ventilation/contract/setup';
 import { useState } from 'react';
 import { useForm, useWatch } from 'react-hook-form';
 import { isStale, numberWords } from '../form-words.ts';
-import { policyKey, policyPath, policyQuery } from '../setup-queries.ts';
 import { policyDifferences, policyOnTop } from './policy-merge.ts';
 
 /**

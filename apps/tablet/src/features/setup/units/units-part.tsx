@@ -1,10 +1,10 @@
 import { useQuery } from '@tanstack/react-query';
 import { Button } from '@windrow/ui/controls/button';
+import { Reading } from '@windrow/ui/controls/reading';
 import { EmptyState } from '@windrow/ui/controls/states';
 import type { Unit } from '@windrow/ventilation/contract/board';
 import { useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
-import { Reading } from '../reading.tsx';
 import { bedsQuery } from '../setup-queries.ts';
 import { UnitChoice } from '../unit-choice.tsx';
 import { NewUnitDialog } from './new-unit-dialog.tsx';

@@ -15,7 +15,7 @@ const AFTER_TUBE = SUPPORT_CATALOGUE.filter(({ kind }) => kind !== 'invasive').m
   }),
 );
 
-/** Something that changes the course; what else is asked follows from what it was. */
+/** Something that changes what comes next; what else is asked follows from what it was. */
 export function happeningPlan({ kind, earlier }: { kind: string; earlier: Earlier }): EntryPlan {
   const known = isHappening(kind) ? kind : null;
   const changesSupport = known !== null && HAPPENING_KINDS[known].support;
