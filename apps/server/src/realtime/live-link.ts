@@ -171,7 +171,9 @@ function tellRooms(deps: Deps, io: Sockets, { beds, changed, dropped }: Tell): v
   for (const event of changed) {
     // Shifts are their unit's affair; the rest is also told to those who set a unit up and hear no beds of it.
     const rooms =
-      event.topic === 'shifts' && event.unitId !== null ? [unitRoom(event.unitId, 'staff')] : [HOUSE_ROOM];
+      event.topic === 'shifts' && event.unitId !== null
+        ? [unitRoom(event.unitId, 'staff'), unitRoom(event.unitId, 'display')]
+        : [HOUSE_ROOM];
     io.to(rooms).emit('changed', event);
   }
   if (changed.some(({ topic }) => topic === 'units')) {
