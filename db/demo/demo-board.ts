@@ -59,7 +59,7 @@ function factsOf({
     checks: newestFirst('check').map((fact) => stamped(fact, (body) => Check.parse(body))),
     gas: newest('gas', (body) => Gas.parse(body)),
     airway: newest('airway', (body) => Airway.parse(body)),
-    airwayCheck: newest('airway-check', (body) => AirwayCheck.parse(body)),
+    airwayChecks: newestFirst('airway-check').map((fact) => stamped(fact, (body) => AirwayCheck.parse(body))),
     happenings: newestFirst('happening').map((fact) => stamped(fact, (body) => Happening.parse(body))),
     support: support && {
       id: support.id,

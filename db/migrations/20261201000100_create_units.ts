@@ -1,6 +1,10 @@
 import type { Knex } from 'knex';
 
 export async function up(db: Knex): Promise<void> {
+  // What the record is: at most one row, written when the demonstration is filled in.
+  await db.schema.createTable('demonstration', (table) => {
+    table.text('filled_at').notNullable();
+  });
   await db.schema.createTable('units', (table) => {
     table.text('id').primary();
     table.text('name').notNullable().unique();
@@ -23,4 +27,5 @@ export async function up(db: Knex): Promise<void> {
 export async function down(db: Knex): Promise<void> {
   await db.schema.dropTable('beds');
   await db.schema.dropTable('units');
+  await db.schema.dropTable('demonstration');
 }

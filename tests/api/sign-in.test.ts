@@ -356,3 +356,28 @@ describe('every answer', () => {
     }
   });
 });
+
+describe('a display', () => {
+  it('stays signed in for its whole term, so that a wall that was off overnight comes back by itself', async () => {
+    const { expiresAt } = (await house.as('display').get('/api/session')).as(Session);
+    expect(Date.parse(expiresAt) - house.clock.now.getTime()).toBeGreaterThan(300 * 86_400_000);
+  });
+});
+
+it('a person who changes their own password keeps this session and ends their others', async () => {
+  const other = house.anybody();
+  await other.signIn('root', PASSWORD);
+  expect((await other.get('/api/session')).status).toBe(200);
+  const { items } = (await house.as('administrator').get('/api/people')).as(listOf(Person));
+  const root = items.find(({ username }) => username === 'root');
+  const changed = await house
+    .as('administrator')
+    .patch(
+      `/api/people/${root?.personId}`,
+      { password: 'another long pass phrase' },
+      { version: root?.version ?? 0 },
+    );
+  expect(changed.status).toBe(200);
+  expect((await other.get('/api/session')).status).toBe(401);
+  expect((await house.as('administrator').get('/api/session')).status).toBe(200);
+});

@@ -26,7 +26,7 @@ export class Listener {
   }
 
   /** Waits until what was heard is enough; fails, and says what was heard, when it never is. */
-  async until(isEnough: (heard: Heard) => boolean, withinMs = 5_000): Promise<Heard> {
+  async until(isEnough: (heard: Heard) => boolean, withinMs = 10_000): Promise<Heard> {
     await new Promise<void>((resolve, reject) => {
       const look = () => {
         if (!isEnough(this.heard)) return;
@@ -47,7 +47,7 @@ export class Listener {
   }
 
   /** Why the server ended it; fails when it did not soon, and leaves no time for the check that comes by every half minute. */
-  ended(withinMs = 5_000): Promise<string> {
+  ended(withinMs = 10_000): Promise<string> {
     const late = new Promise<string>((_, reject) => {
       setTimeout(() => reject(new Error(`still open after ${withinMs} ms`)), withinMs).unref();
     });

@@ -21,6 +21,8 @@ export type Deps = {
   live: Live;
   log: Logger;
   version: string;
+  /** Whether the record is the invented hospital: a fact of the record, said on every screen. */
+  demonstration: boolean;
   /** The server's clock is the clock; tests bring their own. */
   now: () => Date;
 };

@@ -11,10 +11,10 @@ async function main(): Promise<void> {
     publicFolder: join(import.meta.dirname, '..', 'public'),
   });
   server.deps.log.info(
-    { url: server.url, database: settings.database, demonstration: settings.demo },
+    { url: server.url, database: settings.database, demonstration: server.deps.demonstration },
     'serving',
   );
-  if (settings.demo) process.stdout.write(demoWords(server.url));
+  if (server.deps.demonstration) process.stdout.write(demoWords(server.url));
 
   let stopping = false;
   for (const signal of ['SIGINT', 'SIGTERM'] as const) {

@@ -5,6 +5,7 @@ import type { Settings } from './config/settings.ts';
 import type { Deps } from './deps.ts';
 import { makeApp } from './http/app.ts';
 import { migrateDatabase, openDatabase } from './queries/database.ts';
+import { isDemonstration } from './queries/demonstration.ts';
 import { deleteKeysBefore } from './queries/idempotency-keys.ts';
 import { openLiveLink } from './realtime/live-link.ts';
 import { signIns } from './services/sign-ins.ts';
@@ -34,10 +35,19 @@ export async function startServer(
     live: { tell: () => {}, drop: () => {} },
     log,
     version,
+    demonstration: false,
     now,
   };
   // The invented hospital is loaded only where it is asked for.
   if (settings.demo) await (await import('./services/fill-demo.ts')).fillDemo(deps);
+
+  deps.demonstration = await isDemonstration(db);
+  if (deps.demonstration && !settings.demo) {
+    await db.destroy();
+    throw new Error(
+      `${settings.database} holds the demonstration hospital, with passwords that everybody knows. Set WINDROW_DATABASE to another file, or WINDROW_DEMO=1.`,
+    );
+  }
 
   const httpServer = createServer();
   const live = openLiveLink(httpServer, deps);

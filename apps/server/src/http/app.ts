@@ -7,7 +7,7 @@ import { onlyJson } from './middleware/only-json.ts';
 import { answerProblems, BODY_LIMIT_KB, noSuchRoute } from './middleware/problems.ts';
 import { sameOriginWrites } from './middleware/same-origin.ts';
 import { neverStored, securityHeaders } from './middleware/security-headers.ts';
-import { signInLimit } from './middleware/sign-in-limit.ts';
+import { signInLimits } from './middleware/sign-in-limit.ts';
 import { routes } from './routes.ts';
 import { serveRoute } from './serve-route.ts';
 
@@ -33,7 +33,7 @@ function apiRouter(deps: Deps) {
     onlyJson,
     express.json({ limit: `${BODY_LIMIT_KB}kb`, strict: false }),
   );
-  router.post('/session', signInLimit());
+  router.post('/session', signInLimits());
   for (const route of routes) router[route.method](route.path.slice('/api'.length), serveRoute(deps, route));
   router.use(noSuchRoute);
   return router;

@@ -60,8 +60,27 @@ export function sessionAdapter(db: Knex): Adapter {
   };
 }
 
-export async function deleteSessionsOf(db: Knex, personId: string): Promise<void> {
-  await db<SessionRow>('sessions').where({ person_id: personId }).delete();
+export async function setSessionExpiry(db: Knex, sessionId: string, expiresAt: string): Promise<void> {
+  await db<SessionRow>('sessions').where({ id: sessionId }).update({ expires_at: expiresAt });
+}
+
+/** Ends the sessions of a person, but for the one that is kept; returns which were ended. */
+export async function deleteSessionsOf(
+  db: Knex,
+  personId: string,
+  { except }: { except: string | null },
+): Promise<string[]> {
+  const ended = await db<SessionRow>('sessions')
+    .where({ person_id: personId })
+    .whereNot({ id: except ?? '' })
+    .select('id');
+  await db<SessionRow>('sessions')
+    .whereIn(
+      'id',
+      ended.map(({ id }) => id),
+    )
+    .delete();
+  return ended.map(({ id }) => id);
 }
 
 function toSession(row: SessionRow): DatabaseSession {

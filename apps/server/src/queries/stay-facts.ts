@@ -12,6 +12,9 @@ import type { SupportId } from '@windrow/ventilation/support/catalogue';
 import type { Knex } from 'knex';
 import type { ObservationRow } from './observations.ts';
 
+/** Enough for a cuff and a depth that were not looked at each time. */
+const AIRWAY_CHECKS = 20;
+
 type FactRow = ObservationRow & { initials: string };
 
 /** Where a stay is, or how it ended: its 'place' facts. */
@@ -33,7 +36,6 @@ export async function stayFacts(db: Knex, stayId: string, known: Known = {}): Pr
   if (!details) return null;
   const [gas] = await kind<Gas>('gas', 1);
   const [airway] = await kind<Airway>('airway', 1);
-  const [airwayCheck] = await kind<AirwayCheck>('airway-check', 1);
   return {
     stayId,
     version: await versionOf(db, stayId, known),
@@ -42,7 +44,7 @@ export async function stayFacts(db: Knex, stayId: string, known: Known = {}): Pr
     checks: await recentChecks(db, stayId, known),
     gas: gas ?? null,
     airway: airway ?? null,
-    airwayCheck: airwayCheck ?? null,
+    airwayChecks: await kind<AirwayCheck>('airway-check', AIRWAY_CHECKS),
     happenings: await latestHappenings(db, stayId, known),
     support: await supportNow(db, stayId, known),
   };

@@ -21,10 +21,17 @@ export async function stayInBed(db: Knex, bedId: string): Promise<StayRow | null
   return (await db<StayRow>('stays').where({ bed_id: bedId }).whereNull('left_at').first()) ?? null;
 }
 
+/** How hospital numbers are compared: "sg-41 02" and "SG-4102" are one patient's. */
+export function comparable(hospitalNumber: string): string {
+  return hospitalNumber.replaceAll(/\s/g, '').toUpperCase();
+}
+
 export async function presentStayOfPatient(db: Knex, hospitalNumber: string): Promise<StayRow | null> {
   return (
-    (await db<StayRow>('stays').where({ hospital_number: hospitalNumber }).whereNull('left_at').first()) ??
-    null
+    (await db<StayRow>('stays')
+      .where({ hospital_number: comparable(hospitalNumber) })
+      .whereNull('left_at')
+      .first()) ?? null
   );
 }
 

@@ -18,7 +18,6 @@ const SESSION_CHECK_EVERY_BEATS = 6;
 
 const unitRoom = (unitId: string, audience: Audience) => `unit:${unitId}:${audience}`;
 const sessionRoom = (sessionId: string) => `session:${sessionId}`;
-const personRoom = (personId: string) => `person:${personId}`;
 const HOUSE_ROOM = 'house';
 /** Signed in, but hearing no unit's beds (biomedical, administration): they still must know that the link lives. */
 const NO_UNIT_ROOM = 'no-unit';
@@ -109,7 +108,7 @@ async function welcome(deps: Deps, socket: LiveSocket): Promise<void> {
 /** Every room that the person of a connection may hear; says whether a unit is among them. */
 async function joinRooms(deps: Deps, socket: LiveSocket): Promise<boolean> {
   const { person } = socket.data;
-  const rooms = [sessionRoom(person.sessionId), personRoom(person.personId)];
+  const rooms = [sessionRoom(person.sessionId)];
   for (const unit of await allUnits(deps.db)) {
     const audience = audienceOf(person, unit.id, socket.handshake.auth.audience);
     if (audience) rooms.push(unitRoom(unit.id, audience));
@@ -181,7 +180,7 @@ function tellRooms(deps: Deps, io: Sockets, { beds, changed, dropped }: Tell): v
       deps.log.error({ err: error }, 'a new unit is not heard'),
     );
   }
-  for (const personId of dropped) io.in(personRoom(personId)).disconnectSockets(true);
+  for (const sessionId of dropped) io.in(sessionRoom(sessionId)).disconnectSockets(true);
 }
 
 /** Ends connections whose session has ended, or whose person may no longer sign in; renews the others'. */

@@ -5,11 +5,12 @@ import type { Knex } from 'knex';
 import { demoHospital } from '../../../../db/demo/demo-hospital.ts';
 import type { DemoHospital, DemoStay } from '../../../../db/demo/demo-types.ts';
 import type { Deps } from '../deps.ts';
+import { markDemonstration } from '../queries/demonstration.ts';
 import { insertObservation } from '../queries/observations.ts';
 import { anyPerson, insertPerson, replaceGrants } from '../queries/people.ts';
 import { insertPolicy } from '../queries/policies.ts';
 import { insertAssignment, insertShift } from '../queries/shifts.ts';
-import { insertStay } from '../queries/stays.ts';
+import { comparable, insertStay } from '../queries/stays.ts';
 import { insertBed, insertUnit } from '../queries/units.ts';
 import { insertMove, insertVentilator } from '../queries/ventilators.ts';
 import { rebuildBed } from './rebuild-bed.ts';
@@ -41,6 +42,7 @@ export async function fillDemo({ db, signIns, now }: Deps): Promise<void> {
       bedIds: new Map(),
       personIds: new Map(),
     };
+    await markDemonstration(trx, filling.ago(0));
     await fillUnits(filling, hospital);
     await fillPeople(filling, hospital, passwordHash);
     for (const stay of hospital.stays) await fillStay(filling, stay);
@@ -111,7 +113,7 @@ async function fillStay(filling: Filling, stay: DemoStay): Promise<void> {
     id: stayId,
     unit_id: unitId,
     bed_id: leftAt === null ? bedId : null,
-    hospital_number: stay.details.patient.hospitalNumber,
+    hospital_number: comparable(stay.details.patient.hospitalNumber),
     admitted_at: admittedAt,
     left_at: leftAt,
     outcome: stay.outcome,

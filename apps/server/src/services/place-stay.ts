@@ -13,6 +13,7 @@ import { conflict, invalid, notFound } from '../errors.ts';
 import type { Place } from '../queries/stay-facts.ts';
 import { stayFacts } from '../queries/stay-facts.ts';
 import {
+  comparable,
   insertStay,
   presentStayOfPatient,
   type StayRow,
@@ -41,7 +42,7 @@ export async function admitStay(write: Write, { bedId, observedAt, ...details }:
     id: stayId,
     unit_id: bed.unit_id,
     bed_id: bed.id,
-    hospital_number: details.patient.hospitalNumber,
+    hospital_number: comparable(details.patient.hospitalNumber),
     admitted_at: observedAt,
     left_at: null,
     outcome: null,
@@ -70,7 +71,7 @@ export async function correctStay(
   if (!facts) throw new Error(`stay ${stay.id} has no details`);
   const details = StayDetails.parse({ ...facts.details, ...correction });
   requireBorn(details.patient, write.now);
-  if (details.patient.hospitalNumber !== stay.hospital_number)
+  if (comparable(details.patient.hospitalNumber) !== stay.hospital_number)
     await requireNotHere(write, details.patient.hospitalNumber);
   await appendObservation(write, {
     stayId: stay.id,
@@ -80,7 +81,7 @@ export async function correctStay(
     observedAt: write.now < stay.admitted_at ? stay.admitted_at : write.now,
     body: details,
   });
-  await updateStay(write.trx, stay.id, { hospital_number: details.patient.hospitalNumber });
+  await updateStay(write.trx, stay.id, { hospital_number: comparable(details.patient.hospitalNumber) });
   await write.audit({ act: 'correct stay', unitId: stay.unit_id, subject: stay.id });
   return { stay: await readStay(write, stay.id), bed: await changedBed(write, bedId) };
 }

@@ -85,12 +85,12 @@ async function bedsKnownAt(
 }
 
 async function boardHead(
-  { db, settings }: Deps,
+  { db, demonstration }: Deps,
   unit: UnitRow,
 ): Promise<Pick<Board, 'unit' | 'demonstration' | 'fleet'>> {
   return {
     unit: await toUnit(db, unit),
-    demonstration: settings.demo,
+    demonstration,
     fleet: { ready: await readyInUnit(db, unit.id) },
   };
 }

@@ -1,7 +1,8 @@
 import { shownBed } from '@windrow/ventilation/board/shown-bed';
+import { presentSupport } from '@windrow/ventilation/board/tile/present-support';
 import type { Bed } from '@windrow/ventilation/contract/board';
 import { type Capacity, VENTILATOR_CLASSES, type VentilatorClass } from '@windrow/ventilation/contract/fleet';
-import { isOnVentilator, type SupportId, supportEntry } from '@windrow/ventilation/support/catalogue';
+import { isOnVentilator, type SupportKind, supportEntry } from '@windrow/ventilation/support/catalogue';
 import type { Deps } from '../deps.ts';
 import { boardRows } from '../queries/board-rows.ts';
 import { allUnits, type UnitRow } from '../queries/units.ts';
@@ -55,9 +56,12 @@ function unitCounts({
 }): Capacity['units'][number] {
   const occupied = beds.filter((bed) => bed.stay !== null);
   const shown = occupied.map((bed) => shownBed({ bed, now: serverTime }));
-  const onSupport = (test: (id: SupportId) => boolean) =>
-    occupied.filter((bed) => bed.stay?.support && test(bed.stay.support.id)).length;
-  const ofKind = (kind: string) => onSupport((id) => supportEntry(id).kind === kind);
+  // As the wall counts: a support that only a withdrawn check speaks of is not known any more.
+  const supports = shown.map(
+    (one) => presentSupport({ shown: one, now: Date.parse(serverTime) })?.id ?? null,
+  );
+  const ofKind = (kind: SupportKind) =>
+    supports.filter((id) => id !== null && supportEntry(id).kind === kind).length;
   const open = beds.filter((bed) => bed.isOpen).length;
   return {
     unitId: unit.id,
@@ -73,7 +77,7 @@ function unitCounts({
       mask: ofKind('mask'),
       highFlow: ofKind('high-flow'),
       other: ofKind('oxygen') + ofKind('none'),
-      unknown: occupied.filter((bed) => !bed.stay?.support).length,
+      unknown: supports.filter((id) => id === null).length,
     },
     unassigned: shown.filter(({ assignment }) => assignment === null).length,
     checksOverdue: shown.filter(

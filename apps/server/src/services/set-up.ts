@@ -161,7 +161,7 @@ export async function changePerson(
   });
   if (change.grants) await replaceGrants(write.trx, person.id, change.grants);
   // Whoever signs in next has the new roles; a connection opened under the old ones must not stay.
-  if (person.id !== write.person.personId) await write.signOut(person.id);
+  await write.signOut(person.id);
   await write.audit({ act: CHANGE_PERSON, unitId: null, subject: person.id });
   return toPerson(write.trx, {
     ...person,

@@ -4,7 +4,7 @@ import type { Knex } from 'knex';
 import { Lucia, TimeSpan } from 'lucia';
 import type { Settings } from '../config/settings.ts';
 import { grantsOf, personByUsername } from '../queries/people.ts';
-import { sessionAdapter } from '../queries/session-adapter.ts';
+import { sessionAdapter, setSessionExpiry } from '../queries/session-adapter.ts';
 
 export type SignedIn = {
   sessionId: string;
@@ -77,6 +77,8 @@ export function signIns(db: Knex, settings: Settings) {
         Date.now() + (onlyDisplay ? DISPLAY_DAYS * 24 : STAFF_HOURS) * 3_600_000,
       ).toISOString();
       const session = await lucia.createSession(personId, { endsAt });
+      // A wall that was switched off overnight comes back by itself.
+      if (onlyDisplay) await setSessionExpiry(db, session.id, endsAt);
       return { sessionId: session.id, cookie: lucia.createSessionCookie(session.id).serialize() };
     },
 

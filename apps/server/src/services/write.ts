@@ -18,7 +18,7 @@ export type Write = {
   /** Builds a bed's row anew from the facts, with the unit's next revision, to be told after the commit. */
   bedChanged: (bedId: string) => Promise<Tell['beds'][number]>;
   changed: (changed: Changed) => void;
-  /** Signs a person out everywhere: their sessions here, their open connections after the commit. */
+  /** Signs a person out everywhere, but from the session that asks for it; connections end after the commit. */
   signOut: (personId: string) => Promise<void>;
   audit: (entry: { act: string; unitId: string | null; subject: string | null }) => Promise<void>;
 };
@@ -76,8 +76,8 @@ export function beginWrite(
     },
     changed: (changed) => void tell.changed.push(changed),
     async signOut(personId) {
-      await deleteSessionsOf(trx, personId);
-      tell.dropped.push(personId);
+      const except = personId === person.personId ? person.sessionId : null;
+      tell.dropped.push(...(await deleteSessionsOf(trx, personId, { except })));
     },
     audit: ({ act, unitId, subject }) =>
       insertAudit(trx, {

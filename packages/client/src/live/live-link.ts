@@ -2,7 +2,7 @@ import type { QueryClient } from '@tanstack/react-query';
 import type { Board } from '@windrow/ventilation/contract/board';
 import type { Audience, Beat, BedChanged, Changed, ServerToClient } from '@windrow/ventilation/contract/live';
 import { io, type Socket } from 'socket.io-client';
-import { BOARDS_KEY, boardKey, UNITS_KEY } from '../board/board-queries.ts';
+import { boardKey, UNITS_KEY } from '../board/board-queries.ts';
 import { noteServerTime } from '../clock/server-clock.ts';
 import { SESSION_KEY } from '../session/session.ts';
 import { applyBedChanged } from './apply-bed-changed.ts';
@@ -30,7 +30,10 @@ export function connectLive({
   let knocking: ReturnType<typeof setTimeout> | undefined;
 
   // Whatever was said while nobody listened is lost, so everything is read again.
-  socket.on('connect', () => void queryClient.invalidateQueries({ queryKey: BOARDS_KEY }));
+  socket.on(
+    'connect',
+    () => void queryClient.invalidateQueries({ predicate: ({ queryKey }) => queryKey[0] !== SESSION_KEY[0] }),
+  );
   socket.on('beat', (beat) => handleBeat(queryClient, beat));
   socket.on('bed', (changed) => handleBed(queryClient, changed));
   socket.on('changed', ({ topic, unitId }) => {

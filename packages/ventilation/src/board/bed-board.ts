@@ -58,7 +58,7 @@ function stayRow(facts: StayFacts, policy: Policy): BedStay {
     check,
     device,
     airway: airwayNow(facts, device),
-    gas: gasRow(facts, predictedBodyWeightKg),
+    gas: gasRow(facts, predictedBodyWeightKg, policy.freshness.check.withdrawFrom),
     ladder: ladderFor(policy.freshness, orders),
     plateauLimitCmH2O: policy.thresholds.plateauHighCmH2O,
     withdrawn: { check: null, airway: null, gas: null },
@@ -103,32 +103,67 @@ function supportChangedAfter(facts: StayFacts, observedAt: string): string | nul
   );
 }
 
-function gasRow(facts: StayFacts, predictedBodyWeightKg: number | null): BedStay['gas'] {
+function gasRow(
+  facts: StayFacts,
+  predictedBodyWeightKg: number | null,
+  withinMinutes: number,
+): BedStay['gas'] {
   const { gas } = facts;
   if (!gas) return null;
   const { observationId, observedAt, recordedAt, recordedByInitials, body } = gas;
   const { observedAt: _observedAt, confirmedUnusual: _confirmed, note: _note, site, ...values } = body;
-  const atDraw = facts.checks.find((check) => check.observedAt <= observedAt);
   return {
     observationId,
     observedAt,
     recordedAt,
     recordedByInitials,
-    changedSinceAt: settingsChangedAfter(facts, observedAt),
+    changedSinceAt: settingsChangedAfter(facts, {
+      observedAt,
+      fio2Percent: body.fio2Percent,
+      peepCmH2O: body.peepCmH2O,
+    }),
     site,
     values: defined(values),
     ...deriveGas({
       gas: body,
       predictedBodyWeightKg,
-      minuteVolumeLMin: atDraw?.body.readings.minuteVolumeLMin ?? null,
+      minuteVolumeLMin: minuteVolumeAt(facts, observedAt, withinMinutes),
     }),
   };
 }
 
+/**
+ * The minute volume that a gas may be held against: of the last check before it, if that was through a
+ * tube, no older than a check may be shown, and the support was not changed between the two.
+ */
+function minuteVolumeAt(
+  { checks, happenings }: StayFacts,
+  drawnAt: string,
+  withinMinutes: number,
+): number | null {
+  const check = checks.find(({ observedAt }) => observedAt <= drawnAt);
+  if (!check || supportEntry(check.body.mode).kind !== 'invasive') return null;
+  if (Date.parse(drawnAt) - Date.parse(check.observedAt) >= withinMinutes * 60_000) return null;
+  const isOther = happenings.some(
+    ({ body, observedAt }) =>
+      body.toSupport !== undefined && observedAt > check.observedAt && observedAt <= drawnAt,
+  );
+  return isOther ? null : (check.body.readings.minuteVolumeLMin ?? null);
+}
+
+/** An extubation ends a trial whatever was written of its outcome. */
+const ENDS_OR_STARTS_TRIAL = [
+  'trial-started',
+  'trial-passed',
+  'trial-failed',
+  'extubated-planned',
+  'extubated-unplanned',
+] as const;
+
 function courseOf({ happenings }: StayFacts): Pick<BedStay, 'proneSinceAt' | 'away' | 'trial'> {
   const position = latestOf(happenings, ['proned', 'supine']);
   const transport = latestOf(happenings, ['left-for-transport', 'back-from-transport']);
-  const trial = latestOf(happenings, ['trial-started', 'trial-passed', 'trial-failed']);
+  const trial = latestOf(happenings, ENDS_OR_STARTS_TRIAL);
   return {
     proneSinceAt: position?.body.kind === 'proned' ? position.observedAt : null,
     away:

@@ -25,7 +25,8 @@ export type StayFacts = {
   gas: Stamped<Gas> | null;
   /** The latest placed or removed device. */
   airway: Stamped<Airway> | null;
-  airwayCheck: Stamped<AirwayCheck> | null;
+  /** The latest airway checks, newest first: depth and cuff may come from different ones. */
+  airwayChecks: Stamped<AirwayCheck>[];
   /** The latest of each kind of happening. */
   happenings: Stamped<Happening>[];
   /** Since when the latest support has been so, without a break. */

@@ -8,6 +8,18 @@ import { shownBed } from './shown-bed.ts';
  */
 export function bedForAudience({ bed, audience, now }: { bed: Bed; audience: Audience; now: string }): Bed {
   const { bed: shown } = shownBed({ bed, now });
-  if (audience === 'staff' || !shown.stay) return shown;
-  return { ...shown, stay: { ...shown.stay, patient: null, precautions: null, careLimits: null } };
+  if (audience === 'staff') return shown;
+  const assignments = shown.assignments.map((one) => ({ ...one, displayName: one.initials }));
+  if (!shown.stay) return { ...shown, assignments };
+  return {
+    ...shown,
+    assignments,
+    stay: {
+      ...shown.stay,
+      patient: null,
+      precautions: null,
+      careLimits: null,
+      away: shown.stay.away && { ...shown.stay.away, to: null },
+    },
+  };
 }

@@ -2,19 +2,28 @@ import type { Check } from '../contract/observations.ts';
 import type { StayFacts } from './facts.ts';
 
 /**
- * When the settings or the support were first changed after an instant; null while they are as they
+ * When the settings or the support were first changed after a gas was drawn; null while they are as they
  * were then. A gas drawn before that was true of other settings, and is marked so.
  *
- * What was set at the instant is what the last check before it says. Where there was none, the first
- * check after it stands in for it: a change can then only be seen from the second on.
+ * What was set at the draw is what the last check before it says, and before that what was written down
+ * with the gas itself. Where there was no check, the first one after it stands in for it.
  */
 export function settingsChangedAfter(
   { checks, happenings }: Pick<StayFacts, 'checks' | 'happenings'>,
-  instant: string,
+  drawn: { observedAt: string; fio2Percent?: number | undefined; peepCmH2O?: number | undefined },
 ): string | null {
+  const { observedAt: instant, fio2Percent, peepCmH2O } = drawn;
   const later = checks.filter((check) => check.observedAt > instant).reverse();
-  const standing = checks.find((check) => check.observedAt <= instant) ?? later[0];
-  const changed = standing ? later.find((check) => !sameSettings(check.body, standing.body)) : undefined;
+  const standing = (checks.find((check) => check.observedAt <= instant) ?? later[0])?.body;
+  const atDraw = standing && {
+    mode: standing.mode,
+    settings: {
+      ...standing.settings,
+      ...(fio2Percent === undefined ? {} : { fio2Percent }),
+      ...(peepCmH2O === undefined || standing.settings.peepCmH2O === undefined ? {} : { peepCmH2O }),
+    },
+  };
+  const changed = atDraw ? later.find((check) => !sameSettings(check.body, atDraw)) : undefined;
   const support = [...happenings]
     .reverse()
     .find((fact) => fact.body.toSupport !== undefined && fact.observedAt > instant);

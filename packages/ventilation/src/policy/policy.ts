@@ -28,7 +28,14 @@ const task = z.strictObject({
 
 /** What a unit has decided: intervals, thresholds and the minutes its tasks take. Kept by version. */
 export const Policy = z.strictObject({
-  freshness: z.strictObject({ check: AgeLadder, airway: AgeLadder, gas: AgeLadder }),
+  freshness: z.strictObject({
+    check: AgeLadder,
+    airway: AgeLadder,
+    // A gas is held against the checks of two days; an older one could not be marked as before a change.
+    gas: AgeLadder.refine((ladder) => ladder.withdrawFrom <= 2880, {
+      error: 'a gas is withdrawn within 2880 minutes',
+    }),
+  }),
   thresholds: z
     .strictObject({
       vtPerKgHighMl: z.number().min(4).max(15),

@@ -1,28 +1,36 @@
-import type { RequestHandler } from 'express';
+import type { Request, RequestHandler } from 'express';
 import { ipKeyGenerator, rateLimit } from 'express-rate-limit';
 import { Refusal } from '../../errors.ts';
 
 const TRIES = 10;
+const TRIES_OF_ONE_ADDRESS = 100;
 const WINDOW_MINUTES = 15;
 
 /**
- * Ten wrong passwords in a quarter of an hour for one name from one address. Bound to the address, so
- * that nobody can shut a colleague out from elsewhere.
+ * Ten wrong passwords in a quarter of an hour for one name from one address, and a hundred from one
+ * address whatever the names. Bound to the address, so that nobody can shut a colleague out from elsewhere.
  */
-export function signInLimit(): RequestHandler {
+export function signInLimits(): RequestHandler[] {
+  return [
+    limitOf(TRIES, (req) => `${ipKeyGenerator(req.ip ?? '')} ${usernameOf(req.body)}`),
+    limitOf(TRIES_OF_ONE_ADDRESS, (req) => ipKeyGenerator(req.ip ?? '')),
+  ];
+}
+
+function limitOf(tries: number, keyOf: (req: Request) => string): RequestHandler {
   return rateLimit({
     windowMs: WINDOW_MINUTES * 60_000,
-    limit: TRIES,
+    limit: tries,
     skipSuccessfulRequests: true,
     standardHeaders: 'draft-8',
     legacyHeaders: false,
-    keyGenerator: (req) => `${ipKeyGenerator(req.ip ?? '')} ${usernameOf(req.body)}`,
+    keyGenerator: keyOf,
     handler: () => {
       throw new Refusal(
         429,
         'too-many-tries',
         'Too many tries',
-        `After ${TRIES} wrong tries wait ${WINDOW_MINUTES} minutes, or ask the administrator for a new password.`,
+        `After ${tries} wrong tries wait ${WINDOW_MINUTES} minutes, or ask the administrator for a new password.`,
       );
     },
   });

@@ -38,7 +38,7 @@ export const sessionRoutes: Route[] = [
     response: Start,
     handle: async ({ deps }) => ({
       needsAdministrator: !(await anyPerson(deps.db)),
-      demonstration: deps.settings.demo,
+      demonstration: deps.demonstration,
       serverTime: deps.now().toISOString(),
     }),
   }),
@@ -126,13 +126,13 @@ async function openSession(
 }
 
 function toSession(
-  { settings }: Deps,
+  { demonstration }: Deps,
   { personId, username, displayName, initials, grants, expiresAt }: SignedIn,
 ): Session {
   return {
     person: { personId, username, displayName, initials },
     grants,
     expiresAt,
-    demonstration: settings.demo,
+    demonstration,
   };
 }
