@@ -3,8 +3,8 @@ import { Button } from '@windrow/ui/controls/button';
 import { formatTimeWithSeconds } from '@windrow/ventilation/format/clock';
 
 /** Over every page that shows the record: whether it still hears the server, and if not, since when. */
-export function LiveBanner({ timeZone }: { timeZone: string | null }) {
-  const { state, lastHeardAt, upgraded } = useLive();
+export function LiveBanner({ unitId, timeZone }: { unitId: string | undefined; timeZone: string | null }) {
+  const { state, lastHeardAt, upgraded } = useLive(unitId);
   const isLost = state === 'not-live' || state === 'withdrawn';
   const since =
     lastHeardAt !== null && timeZone !== null ? ` since ${formatTimeWithSeconds(lastHeardAt, timeZone)}` : '';

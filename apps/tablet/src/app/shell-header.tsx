@@ -14,10 +14,12 @@ export function ShellHeader({
   session,
   unit,
   units,
+  heardUnitId,
 }: {
   session: Session;
   unit: Unit | null;
   units: readonly Unit[];
+  heardUnitId: string | undefined;
 }) {
   const links = navLinks({ grants: session.grants, unitId: unit?.unitId ?? null });
   return (
@@ -33,7 +35,7 @@ export function ShellHeader({
       <div className="ml-auto flex min-w-0 items-center gap-3">
         <UnitSwitch unit={unit} units={units} />
         {unit && <Clock timeZone={unit.timeZone} />}
-        <LiveWord />
+        <LiveWord unitId={heardUnitId} />
         <PersonMenu session={session} links={links} />
       </div>
     </header>
@@ -53,8 +55,8 @@ const WORDS = {
   withdrawn: 'not live',
 } as const;
 
-function LiveWord() {
-  const { state } = useLive();
+function LiveWord({ unitId }: { unitId: string | undefined }) {
+  const { state } = useLive(unitId);
   return (
     <p className="hidden items-center gap-2 text-ink-muted text-sm sm:flex">
       <span

@@ -6,10 +6,10 @@ export function segmentClass(isChosen: boolean): string {
   return isChosen ? `${shape} bg-ink text-ground` : `${shape} bg-tile text-ink`;
 }
 
-/** Tabs that are pages: a row of links, which scrolls sideways where it is too narrow. */
+/** Tabs that are pages: a row of links, which goes on in a second where it is too narrow: none is ever cut off. */
 export function SegmentedTabs({ label, children }: { label: string; children: ReactNode }) {
   return (
-    <nav aria-label={label} className="-mx-1 flex gap-2 overflow-x-auto px-1 py-1">
+    <nav aria-label={label} className="-mx-1 flex flex-wrap gap-2 px-1 py-1">
       {children}
     </nav>
   );
@@ -29,7 +29,7 @@ export function SegmentedChoice<Value extends string>({
 }) {
   return (
     // biome-ignore lint/a11y/useSemanticElements: a fieldset is for form answers; these buttons show and hide
-    <div role="group" aria-label={label} className="-mx-1 flex gap-2 overflow-x-auto px-1 py-1">
+    <div role="group" aria-label={label} className="-mx-1 flex flex-wrap gap-2 px-1 py-1">
       {options.map((option) => (
         <button
           key={option.value}

@@ -254,6 +254,11 @@ const EDGES: {
   },
 ];
 
+it('names a limit within a sentence with only its first letter small', () => {
+  const sentences = flagsOf(check({ mode: 'ac-pc', limits: {} })).map(({ sentence }) => sentence);
+  expect(sentences.join(' ')).toContain('low exhaled Vt limit');
+});
+
 describe('each rule, at both sides of its edge', () => {
   it.each(EDGES)(
     '$id raises "$short" and keeps quiet one step away',

@@ -90,11 +90,16 @@ function limitsNotRecorded(check: BedCheck): Finding | null {
   const missing = requiredLimits.filter((key) => check.limits[key] === undefined);
   if (missing.length === 0) return null;
   const none = Object.keys(check.limits).length === 0;
-  const names = missing.map((key) => LIMIT_FIELDS[key].label.toLowerCase()).join(' and ');
+  const names = missing.map((key) => inSentence(LIMIT_FIELDS[key].label)).join(' and ');
   return {
     level: 'note',
     short: none ? 'No limits noted' : 'Limit not noted',
     sentence: `Alarm limits not recorded with this check: ${shortName} needs the ${names}.`,
     inputs: [],
   };
+}
+
+/** A label within a sentence: only its first letter is small, so that Vt stays Vt. */
+function inSentence(label: string): string {
+  return label.charAt(0).toLowerCase() + label.slice(1);
 }

@@ -22,6 +22,20 @@ describe('instantIn', () => {
   });
 });
 
+describe('an hour that comes twice', () => {
+  const twice = { day: '2026-10-25', time: '02:30', timeZone: 'Europe/Berlin' };
+  const [first, second] = [Date.parse('2026-10-25T00:30:00Z'), Date.parse('2026-10-25T01:30:00Z')];
+
+  it.each([
+    ['the first pass while the second has not come', first + 60_000, first],
+    ['the first pass to the last moment', second - 1, first],
+    ['the second pass from then on', second, second],
+    ['the first where both lie ahead', first - 60_000, first],
+  ])('means %s', (_which, notAfter, meant) => {
+    expect(instantIn({ ...twice, notAfter })).toBe(meant);
+  });
+});
+
 describe('days', () => {
   it('belong to a zone', () => {
     const instant = Date.parse('2026-03-05T23:30:00Z');

@@ -20,23 +20,28 @@ export function dayMoved(day: string, by: number): string {
 
 /**
  * The instant at which a clock on the wall of this zone shows `hh:mm` on that day. Null when no clock
- * showed it (the hour that is left out in spring). Of an hour that comes twice, the later is meant.
+ * showed it (the hour that is left out in spring). Of an hour that comes twice, the later is meant that
+ * is not after `notAfter`: who writes down what was seen means a time that has been.
  */
 export function instantIn({
   day,
   time,
   timeZone,
+  notAfter = Number.POSITIVE_INFINITY,
 }: {
   day: string;
   time: string;
   timeZone: string;
+  notAfter?: number;
 }): number | null {
   const asUtc = Date.parse(`${day}T${time}:00Z`);
   // A zone lies within 14 h of UTC, and changes its offset by at most one step around one moment.
   const candidates = [asUtc + DAY_MS / 2, asUtc, asUtc - DAY_MS / 2]
     .map((near) => asUtc - offsetAt(near, timeZone))
     .filter((instant) => dayIn(instant, timeZone) === day && formatTime(instant, timeZone) === time);
-  return candidates.length > 0 ? Math.max(...candidates) : null;
+  if (candidates.length === 0) return null;
+  const past = candidates.filter((instant) => instant <= notAfter);
+  return past.length > 0 ? Math.max(...past) : Math.min(...candidates);
 }
 
 function offsetAt(instant: number, timeZone: string): number {

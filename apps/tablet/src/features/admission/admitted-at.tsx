@@ -23,7 +23,9 @@ export function judgeAdmitted({
   if (admitted.is === 'now') return { at: now };
   const isWhole = /^\d{4}-\d{2}-\d{2}$/.test(admitted.day) && /^([01]\d|2[0-3]):[0-5]\d$/.test(admitted.time);
   const isReal = isWhole && !Number.isNaN(Date.parse(admitted.day));
-  const at = isReal ? instantIn({ day: admitted.day, time: admitted.time, timeZone }) : null;
+  const at = isReal
+    ? instantIn({ day: admitted.day, time: admitted.time, timeZone, notAfter: now + AHEAD_MS })
+    : null;
   if (at === null) return { fault: 'Admitted needs a day such as 2026-03-05 and a time such as 09:40' };
   return at > now + AHEAD_MS
     ? {

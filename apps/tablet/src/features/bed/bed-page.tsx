@@ -33,7 +33,7 @@ export function BedPage() {
 
 function OneBed({ board, bed, session }: { board: Board; bed: Bed; session: Session }) {
   const now = useNow();
-  const { state } = useLive();
+  const { state } = useLive(board.unit.unitId);
   const [opened, setOpened] = useState(bed.stay);
   const aged = shownBed({ bed, now });
   const shown: ShownBed = state === 'withdrawn' ? withdrawAll(aged) : aged;

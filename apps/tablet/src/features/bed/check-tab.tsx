@@ -3,6 +3,7 @@ import { useCallback } from 'react';
 import { useBed } from './bed-context.ts';
 import { earlierOf } from './entry/earlier.ts';
 import { checkPlan } from './entry/plans/check-plan.ts';
+import { standingMode } from './entry/plans/standing-mode.ts';
 import type { Earlier } from './entry/rows.ts';
 import { RecordingForm } from './recording-form.tsx';
 
@@ -10,10 +11,11 @@ import { RecordingForm } from './recording-form.tsx';
 export function CheckTab() {
   const { shown, stored, now } = useBed();
   const mode = presentSupport({ shown, now })?.id;
+  const standing = standingMode({ check: shown.bed.stay?.check ?? null, mode });
   const planOf = useCallback(
     (values: Readonly<Record<string, string>>) =>
-      checkPlan({ mode: values.mode ?? '', earlier: earlierCheck({ shown, mode }) }),
-    [shown, mode],
+      checkPlan({ mode: values.mode ?? '', earlier: earlierCheck({ shown, mode }), standing }),
+    [shown, mode, standing],
   );
   return (
     <RecordingForm

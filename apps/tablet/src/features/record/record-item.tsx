@@ -4,11 +4,13 @@ import type { Session } from '@windrow/ventilation/contract/session';
 import { formatMoment } from '@windrow/ventilation/format/clock';
 import { may } from '@windrow/ventilation/permissions/permissions';
 import { Link } from 'react-router-dom';
+import { amendState } from '../bed/amend/amend-state.ts';
 import { mayBeAmended } from './amended-from.ts';
 import { entryInWords, KIND_WORDS } from './entry-in-words.ts';
 
 type RecordItemProps = {
   entry: RecordEntry;
+  stayId: string;
   /** What amends it; 'not-read' where that lies on a page that was not read. Null: it counts. */
   amendment: RecordEntry | 'not-read' | null;
   session: Session;
@@ -22,7 +24,16 @@ type RecordItemProps = {
 const LATE_AFTER_MS = 15 * 60_000;
 
 /** One entry. What was amended is struck through and stays readable, with who amended it, when and why. */
-export function RecordItem({ entry, amendment, session, unitId, amendPath, now, timeZone }: RecordItemProps) {
+export function RecordItem({
+  entry,
+  stayId,
+  amendment,
+  session,
+  unitId,
+  amendPath,
+  now,
+  timeZone,
+}: RecordItemProps) {
   const isStrike = entry.amends?.as === 'struck';
   const act = entry.recordedBy.personId === session.person.personId ? 'amend-own' : 'amend-other';
   const canAmend = mayBeAmended(entry) && may(session.grants, act, unitId);
@@ -36,7 +47,7 @@ export function RecordItem({ entry, amendment, session, unitId, amendPath, now, 
         {canAmend && (
           <Link
             to={amendPath}
-            state={{ entry }}
+            state={amendState({ stayId, entry })}
             className={`${buttonClass('quiet')} ml-auto`}
             aria-label={`Amend: ${KIND_WORDS[entry.kind]} of ${formatMoment(entry.observedAt, now, timeZone)}`}
           >

@@ -65,6 +65,7 @@ function StayRecord({ stayId, revision, session, unitId, amendPath, timeZone }: 
           <li key={entry.observationId}>
             <RecordItem
               entry={entry}
+              stayId={stayId}
               amendment={entry.amendedBy === null ? null : (amendedBy.get(entry.observationId) ?? 'not-read')}
               session={session}
               unitId={unitId}

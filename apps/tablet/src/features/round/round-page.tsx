@@ -25,7 +25,7 @@ export function RoundPage() {
 }
 
 function Round({ board, session }: { board: Board; session: Session }) {
-  const { shown, now } = useShownBeds(board.beds);
+  const { shown, now } = useShownBeds(board);
   const round = roundOf({ beds: shown, personId: session.person.personId, now });
   const hasOwn = round.mine.length > 0;
   const [wantsAll, setWantsAll] = useState(false);

@@ -22,7 +22,16 @@ function anEntry(kind: RecordEntry['kind'], body: Record<string, unknown>): Reco
 function amended(entry: RecordEntry, changes: Record<string, string>) {
   const values = { ...textsOf(entry.body), ...changes };
   const plan = amendPlan({ entry, values, ageMinutes: 100 });
-  const draft = { values, kept: {}, left: [], active: null, typing: null, time: null, startedFrom: null };
+  const draft = {
+    values,
+    kept: {},
+    left: [],
+    active: null,
+    typing: null,
+    time: null,
+    mayStand: false,
+    startedFrom: null,
+  };
   return { plan, judged: judgeEntry({ plan, draft, weightKg: null }) };
 }
 
@@ -36,8 +45,9 @@ const CHECK = anEntry('check', {
 
 describe('amendPlan', () => {
   it('opens with what stands in the record, and shows only what differs as changed', () => {
-    const { judged } = amended(CHECK, { peepCmH2O: '10', reason: 'misread' });
-    const review = reviewOf(judged);
+    const { plan, judged } = amended(CHECK, { peepCmH2O: '10', reason: 'misread', spo2Percent: '' });
+    const review = reviewOf({ plan, judged, ageMinutes: 0 });
+    expect(review.leavesBoard).toEqual([]);
     expect(review.changed.map(({ label, before, now }) => [label, before, now])).toEqual([
       ['PEEP', '8\u00a0cmH2O', '10\u00a0cmH2O'],
     ]);
@@ -46,7 +56,6 @@ describe('amendPlan', () => {
       'vtSetMl',
       'rateSetPerMin',
       'fio2Percent',
-      'spo2Percent',
       'passive',
       'highPressureCmH2O',
     ]);

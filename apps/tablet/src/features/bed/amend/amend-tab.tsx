@@ -1,7 +1,7 @@
 import { buttonClass } from '@windrow/ui/controls/button';
 import { SegmentedChoice } from '@windrow/ui/controls/segmented-tabs';
 import { EmptyState } from '@windrow/ui/controls/states';
-import { RecordEntry } from '@windrow/ventilation/contract/observations';
+import type { RecordEntry } from '@windrow/ventilation/contract/observations';
 import { useCallback, useState } from 'react';
 import { Link, useLocation, useNavigate } from 'react-router-dom';
 import { useBed } from '../bed-context.ts';
@@ -9,6 +9,7 @@ import { EntryForm } from '../entry/entry-form.tsx';
 import { struckPlan } from '../entry/plans/stay-plans.ts';
 import { useThresholds } from '../use-thresholds.ts';
 import { amendPlan, isAmendable, textsOf } from './amend-plan.ts';
+import { entryIn } from './amend-state.ts';
 
 type As = 'corrected' | 'struck';
 
@@ -19,9 +20,9 @@ const WAYS: readonly { value: As; label: string }[] = [
 
 /** Mends one entry of the record. Which one came along from the record's page. */
 export function AmendTab() {
-  const { board, shown } = useBed();
+  const { board, shown, stay } = useBed();
   const state: unknown = useLocation().state;
-  const entry = entryIn(state);
+  const entry = entryIn({ state, stayId: stay.stayId });
   const recordPath = `/beds/${board.unit.unitId}/${shown.bed.bedId}/record`;
   if (!entry || !isAmendable(entry)) {
     return (
@@ -33,12 +34,6 @@ export function AmendTab() {
     );
   }
   return <Amend key={entry.observationId} entry={entry} recordPath={recordPath} />;
-}
-
-function entryIn(state: unknown): RecordEntry | null {
-  if (typeof state !== 'object' || state === null || !('entry' in state)) return null;
-  const parsed = RecordEntry.safeParse(state.entry);
-  return parsed.success ? parsed.data : null;
 }
 
 function Amend({ entry, recordPath }: { entry: RecordEntry; recordPath: string }) {

@@ -16,6 +16,8 @@ export type EntryDraft = {
   /** The row that was typed into since the keypad came to it: from then on digits are added, before that they replace. */
   typing: string | null;
   time: TimeDraft;
+  /** It was sent without an answer and stopped: the record may hold it as it was then. */
+  mayStand: boolean;
   /** The fact that was the latest when this was begun; another since then is told. */
   startedFrom: string | null;
 };
@@ -23,6 +25,8 @@ export type EntryDraft = {
 export type EntryAction =
   | { type: 'press'; row: NumberRow; key: KeypadKey }
   | { type: 'repeat'; row: NumberRow }
+  | { type: 'repeat-all'; rows: readonly NumberRow[] }
+  | { type: 'stopped' }
   | { type: 'set'; key: string; text: string }
   | { type: 'focus'; key: string | null }
   | { type: 'leave'; key: string }
@@ -42,7 +46,11 @@ export function reduceEntry(draft: EntryDraft, action: EntryAction): EntryDraft 
         typing: action.row.key,
       };
     case 'repeat':
-      return withText(draft, action.row.key, repeated(action.row) ?? draft.values[action.row.key] ?? '');
+      return withRepeat(draft, action.row);
+    case 'repeat-all':
+      return action.rows.reduce(withRepeat, draft);
+    case 'stopped':
+      return { ...draft, mayStand: true };
     case 'set':
       return withText(draft, action.key, action.text);
     case 'focus':
@@ -72,7 +80,7 @@ export function reduceEntry(draft: EntryDraft, action: EntryAction): EntryDraft 
 export function isUntouched(draft: EntryDraft, initial: EntryDraft): boolean {
   const keys = new Set([...Object.keys(draft.values), ...Object.keys(initial.values)]);
   const sameValues = [...keys].every((key) => (draft.values[key] ?? '') === (initial.values[key] ?? ''));
-  return sameValues && isSameTime(draft.time, initial.time);
+  return !draft.mayStand && sameValues && isSameTime(draft.time, initial.time);
 }
 
 const CHANGES_WHAT_STANDS: readonly KeypadKey[] = ['plus', 'minus', 'erase', 'sign'];
@@ -93,6 +101,10 @@ function stepStart({ repeat, before }: NumberRow): number | null {
 function repeated({ repeat, field }: NumberRow): string | null {
   if (repeat === null) return null;
   return repeat.value === 'off' ? 'off' : toText(repeat.value, field);
+}
+
+function withRepeat(draft: EntryDraft, row: NumberRow): EntryDraft {
+  return withText(draft, row.key, repeated(row) ?? draft.values[row.key] ?? '');
 }
 
 function withText(draft: EntryDraft, key: string, text: string): EntryDraft {

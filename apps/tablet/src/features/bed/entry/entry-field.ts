@@ -40,7 +40,12 @@ export type ChoiceRow = Row & {
 export type TextRow = Row & { kind: 'text'; hint: string };
 export type EntryRow = NumberRow | ChoiceRow | TextRow;
 
-export type EntrySection = { title: string; rows: readonly EntryRow[] };
+export type EntrySection = {
+  title: string;
+  rows: readonly EntryRow[];
+  /** One press may say of all its numbers that they are as before. */
+  mayRepeat?: boolean;
+};
 
 /** A value in words, as it stands in a row, the review and the record. */
 export function valueInWords(row: EntryRow, value: EntryValue): string {

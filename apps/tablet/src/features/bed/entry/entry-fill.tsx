@@ -8,6 +8,7 @@ import { faultsOf } from './faults.ts';
 import type { Findings } from './findings.ts';
 import { DerivedLines, FindingFlags } from './findings-panel.tsx';
 import { obstaclesOf } from './judge-entry.ts';
+import { MayStand } from './may-stand.tsx';
 import { Obstacles } from './obstacles.tsx';
 import { progressInWords } from './review.ts';
 import { focusRow } from './row-id.ts';
@@ -62,6 +63,7 @@ export function EntryFill({
   return (
     <div className="flex flex-col gap-3 dock-side:grid dock-side:grid-cols-[minmax(0,1fr)_clamp(17.5rem,33vw,24rem)] dock-side:items-start">
       <div className="flex min-w-0 flex-col gap-3">
+        {draft.mayStand && <MayStand takesFocus />}
         {hasNewer && (
           <Notice
             tone="note"
@@ -124,12 +126,12 @@ function Dock({
   );
 }
 
-/** The pad is open from the start, where everything before the first number is given already. */
-function useFirstRow({ judged }: Entry): void {
+/** The pad is open from the start, where everything before the first number is given already, and nothing is to be read first. */
+function useFirstRow({ judged, draft }: Entry): void {
   const index = judged.rows.findIndex(({ row }) => row.kind === 'number');
   const isReady = judged.rows.slice(0, index).every(({ judgement }) => judgement.state === 'valid');
   const first = isReady ? judged.rows[index]?.row.key : undefined;
-  const [opensAt] = useState(first);
+  const [opensAt] = useState(draft.mayStand ? undefined : first);
   useEffect(() => {
     if (opensAt !== undefined) focusRow(opensAt);
   }, [opensAt]);

@@ -64,13 +64,16 @@ export function EntryForm({
           plan.timeLabel && whenInWords({ label: plan.timeLabel, observedAt: step.observedAt, now, timeZone })
         }
         statement={plan.statement}
-        review={reviewOf(judged)}
+        review={reviewOf({ plan, judged, ageMinutes: (now - step.observedAt) / 60_000 })}
         flags={findings.flags}
         verb={verb}
         recording={flow.recording}
         wasSent={flow.wasSent}
         onRecord={flow.record}
+        isOpen={flow.isOpen}
+        mayStand={entry.draft.mayStand}
         onBack={flow.back}
+        onStop={flow.stop}
       />
     );
   }

@@ -17,6 +17,8 @@ export type EntryPlan = {
   bodyOf: (values: EntryValues) => Record<string, unknown>;
   /** The server's own schema of the body, held against it before it is sent. */
   schema: z.ZodType;
+  /** Rows whose last value stands on the board, and leaves it with a newer fact that says nothing of them. */
+  onBoard?: readonly string[];
   /** Said in the review where the rows alone do not say it: "The device is taken out". */
   statement?: string;
 };

@@ -3,6 +3,7 @@ import { TIME_KEY } from './entry-draft.ts';
 import type { EntryRow } from './entry-field.ts';
 import type { JudgedRow } from './judge-entry.ts';
 import { NumberRowView } from './number-row.tsx';
+import { RepeatAll } from './repeat-all.tsx';
 import { TextRowView } from './text-row.tsx';
 import { TimeRow } from './time-row.tsx';
 import type { Entry } from './use-entry.ts';
@@ -34,10 +35,15 @@ export function EntrySections({ entry, faults, now, timeZone, onNext }: EntrySec
           />
         </div>
       )}
-      {entry.plan.sections.map(({ title, rows: planned }) => (
-        <div key={title} className={PLATE}>
-          {planned.length > 1 && <h2 className="pt-2 font-bold text-ink-muted">{title}</h2>}
-          {planned.map((row) => {
+      {entry.plan.sections.map((section) => (
+        <div key={section.title} className={PLATE}>
+          {section.rows.length > 1 && (
+            <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1 pt-2">
+              <h2 className="font-bold text-ink-muted">{section.title}</h2>
+              <RepeatAll section={section} entry={entry} onNext={onNext} />
+            </div>
+          )}
+          {section.rows.map((row) => {
             const judgedRow = rows.get(row.key);
             return (
               judgedRow && (

@@ -37,6 +37,20 @@ describe('judgeTime', () => {
     expect(later).toEqual({ state: 'set', at: Date.parse('2026-10-25T01:30:00Z') });
   });
 
+  it.each([
+    ['2026-10-25T00:35:00Z', '2026-10-25T00:30:00Z'],
+    ['2026-10-25T01:27:30Z', '2026-10-25T00:30:00Z'],
+    ['2026-10-25T01:28:00Z', '2026-10-25T01:30:00Z'],
+    ['2026-10-25T01:40:00Z', '2026-10-25T01:30:00Z'],
+  ])('at %s takes the pass of the hour that has been', (clock, meant) => {
+    const judged = judgeTime({
+      time: { day: '2026-10-25', digits: '0230' },
+      now: Date.parse(clock),
+      timeZone: 'Europe/Berlin',
+    });
+    expect(judged).toEqual({ state: 'set', at: Date.parse(meant) });
+  });
+
   it('accepts two minutes ahead of the clock and no more', () => {
     expect(at('2026-03-29', '1222').state).toBe('set');
     expect(at('2026-03-29', '1223')).toEqual({

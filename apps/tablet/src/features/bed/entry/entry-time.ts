@@ -28,7 +28,7 @@ export function judgeTime({
   const clock = clockOf(time.digits);
   if (clock === null)
     return { state: 'refused', message: 'The time is four digits of a 24-hour clock, such as 09:40' };
-  const at = instantIn({ day: time.day, time: clock, timeZone });
+  const at = instantIn({ day: time.day, time: clock, timeZone, notAfter: now + AHEAD_MS });
   if (at === null)
     return {
       state: 'refused',

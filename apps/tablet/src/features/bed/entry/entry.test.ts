@@ -7,7 +7,9 @@ import { airwayCheckPlan } from './plans/airway-check-plan.ts';
 import { checkPlan } from './plans/check-plan.ts';
 import { gasPlan } from './plans/gas-plan.ts';
 import { happeningPlan } from './plans/happening-plan.ts';
-import { progressInWords, reviewOf } from './review.ts';
+import { standingMode } from './plans/standing-mode.ts';
+import { repeatableRows } from './repeatable-rows.ts';
+import { leavesBoardInWords, progressInWords, reviewOf } from './review.ts';
 
 const LAST: Record<string, Before> = {
   mode: { state: 'shown', value: 'ac-vc', ageMinutes: 275 },
@@ -20,7 +22,16 @@ const earlier = (key: string) => LAST[key] ?? NOTHING_BEFORE;
 const observedAt = Date.parse('2026-03-05T11:20:00Z');
 
 function draftOf(values: Record<string, string>, kept: Record<string, string> = {}): EntryDraft {
-  return { values, kept, left: [], active: null, typing: null, time: null, startedFrom: null };
+  return {
+    values,
+    kept,
+    left: [],
+    active: null,
+    typing: null,
+    time: null,
+    mayStand: false,
+    startedFrom: null,
+  };
 }
 
 const VALID = { mode: 'ac-vc', vtSetMl: '430', rateSetPerMin: '18', peepCmH2O: '10', fio2Percent: '0.45' };
@@ -131,8 +142,8 @@ describe('a check', () => {
 
 describe('the review', () => {
   it('tells changed, confirmed and new values apart, and what is left out', () => {
-    const { judged } = judgedCheck({ ...VALID, spo2Percent: '95' });
-    const review = reviewOf(judged);
+    const { plan, judged } = judgedCheck({ ...VALID, spo2Percent: '95' });
+    const review = reviewOf({ plan, judged, ageMinutes: 0 });
     expect(review.changed).toEqual([
       { key: 'peepCmH2O', label: 'PEEP', before: '8\u00a0cmH2O', now: '10\u00a0cmH2O', isUnusual: false },
       { key: 'fio2Percent', label: 'Oxygen (FiO2)', before: '50\u00a0%', now: '45\u00a0%', isUnusual: false },
@@ -145,7 +156,95 @@ describe('the review', () => {
   });
 });
 
+describe('what leaves the board', () => {
+  const read: Record<string, Before> = {
+    ...LAST,
+    peakCmH2O: { state: 'shown', value: 30, ageMinutes: 275 },
+    spo2Percent: { state: 'shown', value: 95, ageMinutes: 275 },
+    intrinsicPeepCmH2O: { state: 'withdrawn', observedAt: '2026-03-05T02:10:00Z' },
+  };
+  const leaving = ({
+    standing = 'ac-vc',
+    ageMinutes = 0,
+  }: {
+    standing?: string | null;
+    ageMinutes?: number;
+  } = {}) => {
+    const plan = checkPlan({ mode: 'ac-vc', earlier: (key) => read[key] ?? NOTHING_BEFORE, standing });
+    const judged = judgeEntry({ plan, draft: draftOf({ ...VALID, spo2Percent: '96' }), weightKg: null });
+    return reviewOf({ plan, judged, ageMinutes }).leavesBoard;
+  };
+
+  it('is each reading that the last check had and this one leaves out', () => {
+    expect(leaving()).toEqual(['Peak pressure']);
+  });
+
+  it('is nothing where the last check no longer holds, or is newer than this one', () => {
+    expect(leaving({ standing: null })).toEqual([]);
+    expect(leaving({ ageMinutes: 300 })).toEqual([]);
+  });
+
+  it('is said in one sentence', () => {
+    expect(leavesBoardInWords(['Plateau'])).toBe('Plateau is no longer shown on the board after this check.');
+    expect(leavesBoardInWords(['Plateau', 'Leak'])).toMatch(/^Plateau, Leak are no longer/);
+  });
+});
+
+describe('all settings as before', () => {
+  const settingsOf = ({
+    mode = 'ac-vc',
+    standing = 'ac-vc',
+  }: {
+    mode?: string;
+    standing?: string | null;
+  } = {}) =>
+    checkPlan({ mode, earlier, standing }).sections.find(({ title }) => title === 'Settings') ?? {
+      title: '',
+      rows: [],
+    };
+  const keys = (values: Record<string, string>, where = {}) =>
+    repeatableRows(settingsOf(where), { values }).map(({ key }) => key);
+
+  it('are those that were recorded and are not given yet', () => {
+    expect(keys({})).toEqual(['vtSetMl', 'rateSetPerMin', 'peepCmH2O', 'fio2Percent']);
+    expect(keys({ fio2Percent: '55' })).toEqual(['vtSetMl', 'rateSetPerMin', 'peepCmH2O']);
+  });
+
+  it('are none in another mode, and none where the last check does not hold', () => {
+    expect(keys({}, { mode: 'psv' })).toEqual([]);
+    expect(keys({}, { standing: null })).toEqual([]);
+  });
+
+  it('are each confirmed, and each can be changed after that', () => {
+    const rows = repeatableRows(settingsOf(), { values: {} });
+    const repeated = reduceEntry(draftOf({ mode: 'ac-vc' }), { type: 'repeat-all', rows });
+    const { judged } = judgedCheck({ ...repeated.values });
+    expect(obstaclesOf(judged)).toEqual([]);
+    expect(progressInWords(judged)).toMatch(/^5 as before · \d+ left$/);
+    const [row] = rows;
+    if (!row) throw new Error('no row');
+    expect(reduceEntry(repeated, { type: 'press', row, key: 'plus' }).values[row.key]).toBe('440');
+  });
+
+  it('hold only for a check of the mode that the patient is on, with no change since', () => {
+    const check = { mode: 'ac-vc', changedSinceAt: null } as const;
+    expect(standingMode({ check, mode: 'ac-vc' })).toBe('ac-vc');
+    expect(standingMode({ check, mode: 'psv' })).toBeNull();
+    expect(standingMode({ check: null, mode: 'ac-vc' })).toBeNull();
+    expect(
+      standingMode({ check: { ...check, changedSinceAt: '2026-03-05T11:00:00Z' }, mode: 'ac-vc' }),
+    ).toBeNull();
+  });
+});
+
 describe('a draft', () => {
+  it('that was sent and stopped says so until it is recorded, though nothing in it differs', () => {
+    const initial = draftOf({ mode: 'ac-vc' });
+    const stopped = reduceEntry(initial, { type: 'stopped' });
+    expect(stopped.mayStand).toBe(true);
+    expect(isUntouched(stopped, initial)).toBe(false);
+  });
+
   it('takes a value over only when asked to', () => {
     const row = rowOf('peepCmH2O');
     const empty = draftOf({});

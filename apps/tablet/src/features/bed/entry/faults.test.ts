@@ -17,7 +17,16 @@ function faults(
     refusals = {},
   }: Partial<EntryDraft> & { wasTried?: boolean; refusals?: Parameters<typeof faultsOf>[0]['refusals'] } = {},
 ) {
-  const draft: EntryDraft = { values, kept: {}, left, active, typing: null, time: null, startedFrom: null };
+  const draft: EntryDraft = {
+    values,
+    kept: {},
+    left,
+    active,
+    typing: null,
+    time: null,
+    mayStand: false,
+    startedFrom: null,
+  };
   return faultsOf({
     judged: judgeEntry({ plan, draft, weightKg: null }),
     draft,
@@ -59,6 +68,7 @@ describe('refusalsOf', () => {
         active: null,
         typing: null,
         time: null,
+        mayStand: false,
         startedFrom: null,
       },
       weightKg: null,

@@ -3,7 +3,8 @@ import { Notice } from '@windrow/ui/controls/notice';
 import { useEffect, useRef } from 'react';
 import type { Findings } from './findings.ts';
 import { FindingFlags } from './findings-panel.tsx';
-import type { Review, ReviewLine } from './review.ts';
+import { MayStand } from './may-stand.tsx';
+import { leavesBoardInWords, type Review, type ReviewLine } from './review.ts';
 import type { Recording } from './use-recording.ts';
 
 type ReviewPanelProps = {
@@ -17,8 +18,12 @@ type ReviewPanelProps = {
   verb: string;
   recording: Pick<Recording, 'state' | 'problem'>;
   wasSent: boolean;
+  /** A try was not answered: only stopping leads back to the values. */
+  isOpen: boolean;
+  mayStand: boolean;
   onRecord: () => void;
   onBack: () => void;
+  onStop: () => void;
 };
 
 /** Exactly what will stand in the record, before it does. */
@@ -32,8 +37,11 @@ export function ReviewPanel({
   verb,
   recording,
   wasSent,
+  isOpen,
+  mayStand,
   onRecord,
   onBack,
+  onStop,
 }: ReviewPanelProps) {
   const heading = useRef<HTMLHeadingElement>(null);
   useEffect(() => heading.current?.focus(), []);
@@ -60,6 +68,9 @@ export function ReviewPanel({
             {review.leftOut.join(', ')}
           </p>
         )}
+        {review.leavesBoard.length > 0 && (
+          <p className="font-bold">{leavesBoardInWords(review.leavesBoard)}</p>
+        )}
         <FindingFlags flags={flags} />
       </div>
       <div className="sticky bottom-0 flex flex-col gap-2 bg-ground py-3">
@@ -68,13 +79,14 @@ export function ReviewPanel({
             <p>Send it again as it is: whatever became of it, it is recorded once.</p>
           </Notice>
         )}
-        <RecordingWords recording={recording} />
+        {mayStand && recording.state === 'idle' && <MayStand />}
+        <RecordingWords recording={recording} isOpen={isOpen} />
         <div className="flex flex-wrap gap-3">
           <Button tone="main" className="min-h-16 px-8 text-lg" disabled={isSending} onClick={onRecord}>
             {isSending ? 'Sending …' : recording.state === 'no-network' ? 'Send again now' : verb}
           </Button>
-          <Button className="min-h-16" disabled={isSending} onClick={onBack}>
-            Back to the values
+          <Button className="min-h-16" disabled={isSending} onClick={isOpen ? onStop : onBack}>
+            {isOpen ? 'Stop sending and change' : 'Back to the values'}
           </Button>
         </div>
       </div>
@@ -120,7 +132,10 @@ function ReviewLines({
   );
 }
 
-function RecordingWords({ recording: { state, problem } }: Pick<ReviewPanelProps, 'recording'>) {
+function RecordingWords({
+  recording: { state, problem },
+  isOpen,
+}: Pick<ReviewPanelProps, 'recording' | 'isOpen'>) {
   return (
     <div role="status">
       {state === 'sending-again' && <p>No answer yet. It is being sent again; it will be recorded once.</p>}
@@ -128,18 +143,24 @@ function RecordingWords({ recording: { state, problem } }: Pick<ReviewPanelProps
         <Notice tone="attention" title="Not recorded yet: the server does not answer">
           <p>
             Everything you typed is kept here, and is sent again every few seconds. Stay on this page, or send
-            it now.
+            it now. To change a value, stop the sending first.
           </p>
         </Notice>
       )}
       {state === 'refused' && problem?.problem.status === 401 && (
-        <Notice tone="attention" title="Not recorded: your session had ended">
+        <Notice
+          tone="attention"
+          title={isOpen ? 'No answer yet: your session had ended' : 'Not recorded: your session had ended'}
+        >
           <p>What you typed is kept. You are signed in again, so record it now.</p>
         </Notice>
       )}
       {state === 'refused' && problem && problem.problem.status !== 401 && (
         <Notice tone="attention" title={problem.problem.title}>
-          <p>{problem.problem.detail} Nothing was recorded; what you typed is kept.</p>
+          <p>
+            {problem.problem.detail} {isOpen ? 'A try may have been recorded' : 'Nothing was recorded'}; what
+            you typed is kept.
+          </p>
         </Notice>
       )}
     </div>

@@ -1,4 +1,5 @@
 import { type EntryRow, type EntryValue, valueInWords } from './entry-field.ts';
+import type { EntryPlan } from './entry-plan.ts';
 import type { JudgedEntry, JudgedRow } from './judge-entry.ts';
 
 export type ReviewLine = {
@@ -16,9 +17,25 @@ export type Review = {
   added: readonly ReviewLine[];
   /** Asked for and not given: nothing is recorded for these. */
   leftOut: readonly string[];
+  /** Of these, what the last fact had: it leaves the board. */
+  leavesBoard: readonly string[];
 };
 
-export function reviewOf({ rows }: JudgedEntry): Review {
+/** @param input.ageMinutes how long ago it was observed: a late entry older than the last changes no board. */
+export function reviewOf({
+  plan,
+  judged: { rows },
+  ageMinutes,
+}: {
+  plan: Pick<EntryPlan, 'onBoard'>;
+  judged: JudgedEntry;
+  ageMinutes: number;
+}): Review {
+  const leavesBoard = ({ row, judgement }: JudgedRow) =>
+    judgement.state === 'empty' &&
+    plan.onBoard?.includes(row.key) === true &&
+    row.before.state === 'shown' &&
+    row.before.ageMinutes > ageMinutes;
   const of = (change: JudgedRow['change']) => rows.filter((row) => row.change === change).flatMap(lineOf);
   return {
     changed: of('changed'),
@@ -27,7 +44,12 @@ export function reviewOf({ rows }: JudgedEntry): Review {
     leftOut: rows
       .filter(({ row, judgement }) => judgement.state === 'empty' && row.key !== 'note')
       .map(({ row }) => row.label),
+    leavesBoard: rows.filter(leavesBoard).map(({ row }) => row.label),
   };
+}
+
+export function leavesBoardInWords(labels: readonly string[]): string {
+  return `${labels.join(', ')} ${labels.length === 1 ? 'is' : 'are'} no longer shown on the board after this check.`;
 }
 
 function lineOf({ row, judgement, isKept }: JudgedRow): ReviewLine[] {

@@ -7,18 +7,16 @@ import { isSameTime, timeFrom } from './entry-time.ts';
 import { type Refusals, refusalsOf } from './faults.ts';
 import { obstaclesOf } from './judge-entry.ts';
 import { focusRow } from './row-id.ts';
+import { afterRefusal, type Reviewed, type Sent, sending, wayBack } from './sent.ts';
 import { type Entry, type EntryInput, useEntry } from './use-entry.ts';
 import { type Recording, useRecording } from './use-recording.ts';
 
 export type Refused = { refusals: Refusals; others: readonly string[] };
 
-/** A reviewed entry is one act: it keeps its key for as long as nothing in it is changed. */
-type Reviewed = { is: 'review'; observedAt: number; body: Record<string, unknown>; key: string };
-
 export type Step = { is: 'fill' } | Reviewed;
 
 /** Sent and not answered. It is not known whether they arrived, so they are kept with their keys. */
-const unanswered = draftStore<Reviewed>();
+const unanswered = draftStore<Sent>();
 
 export type EntryFlow = {
   entry: Entry;
@@ -31,7 +29,10 @@ export type EntryFlow = {
   wasSent: boolean;
   review: () => void;
   record: () => void;
+  /** Open: a try was not answered, and only stopping leads back to the values. */
+  isOpen: boolean;
   back: () => void;
+  stop: () => void;
 };
 
 type EntryFlowInput = Omit<EntryInput, 'initialTime'> & {
@@ -53,6 +54,9 @@ export function useEntryFlow({ initialAt, path, wrap, onRecorded, ...input }: En
   const [tries, setTries] = useState(0);
   const [refused, setRefused] = useState(NOTHING_REFUSED);
   const { plan, judged, time } = entry;
+  const { draftKey } = input;
+  const held = unanswered.useDraft(draftKey);
+  const wasSent = step === sentBefore;
 
   const refuse = (errors: readonly { key: string; message: string }[]) => {
     const next = refusalsOf({ errors, judged });
@@ -65,13 +69,22 @@ export function useEntryFlow({ initialAt, path, wrap, onRecorded, ...input }: En
 
   const recording = useRecording({
     path,
-    onRecorded: (isHere) => {
-      unanswered.drop(input.draftKey);
+    onRecorded: ({ key }, isHere) => {
+      // Stopped meanwhile: what is typed now is another entry, and not recorded.
+      if (unanswered.get(draftKey)?.key !== key) return;
+      unanswered.drop(draftKey);
       entry.forget();
       onRecorded(step.is === 'review' ? step.body : {}, isHere);
     },
+    onUnanswered: () => {
+      const sent = unanswered.get(draftKey);
+      if (sent) unanswered.set(draftKey, { ...sent, isOpen: true });
+    },
     onRefused: ({ problem }) => {
-      unanswered.drop(input.draftKey);
+      const sent = unanswered.get(draftKey);
+      const left = sent ? afterRefusal(sent, problem.status) : null;
+      if (left) unanswered.set(draftKey, left);
+      else unanswered.drop(draftKey);
       const errors = (problem.errors ?? []).map(({ path: at, message }) => ({ key: keyOfPath(at), message }));
       // What is said of no row is said of the whole, in the review.
       if (errors.some(({ key }) => judged.rows.some(({ row }) => row.key === key))) refuse(errors);
@@ -92,6 +105,12 @@ export function useEntryFlow({ initialAt, path, wrap, onRecorded, ...input }: En
     setStep({ is: 'review', observedAt, body: made.body, key: newKey() });
   };
 
+  const back = () => {
+    unanswered.drop(draftKey);
+    recording.reset();
+    setStep({ is: 'fill' });
+  };
+
   return {
     entry,
     step,
@@ -99,15 +118,17 @@ export function useEntryFlow({ initialAt, path, wrap, onRecorded, ...input }: En
     refused,
     recording,
     review,
-    wasSent: step === sentBefore,
+    wasSent,
+    isOpen: wayBack({ held, wasSent }) === 'stop',
     record: () => {
       if (step.is !== 'review') return;
-      unanswered.set(input.draftKey, step);
+      unanswered.set(draftKey, sending(step, unanswered.get(draftKey)));
       recording.send({ key: step.key, body: wrap(step.body, judged.values) });
     },
-    back: () => {
-      unanswered.drop(input.draftKey);
-      setStep({ is: 'fill' });
+    back,
+    stop: () => {
+      entry.dispatch({ type: 'stopped' });
+      back();
     },
   };
 }

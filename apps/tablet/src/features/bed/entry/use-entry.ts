@@ -49,6 +49,7 @@ export function useEntry({
     active: null,
     typing: null,
     time: initialTime,
+    mayStand: false,
     startedFrom: latestId,
   }));
   const [draft, dispatch] = useReducer(reduceEntry, initial, (fresh) => {

@@ -17,6 +17,7 @@ export type Recording = {
   state: RecordingState;
   problem: ProblemError | null;
   send: (act: Act) => void;
+  /** Back to nothing sent; what was to be sent again is not. */
   reset: () => void;
 };
 
@@ -31,10 +32,13 @@ const AGAIN_AFTER_MS = 8_000;
 export function useRecording({
   path,
   onRecorded,
+  onUnanswered,
   onRefused,
 }: {
   path: string;
-  onRecorded: (isHere: boolean) => void;
+  onRecorded: (act: Act, isHere: boolean) => void;
+  /** A try got no answer: from now on it may stand in the record. */
+  onUnanswered: () => void;
   onRefused: (problem: ProblemError) => void;
 }): Recording {
   const queryClient = useQueryClient();
@@ -43,14 +47,21 @@ export function useRecording({
 
   const mutation = useMutation({
     mutationFn: ({ key, body }: Act) =>
-      write<Recorded>({ method: 'POST', path, body, key, onRetry: () => setAgain(true) }),
-    onSuccess: async ({ bed, beds = bed ? [bed] : [] }) => {
+      write<Recorded>({
+        ...{ method: 'POST', path, body, key },
+        onRetry: () => {
+          setAgain(true);
+          onUnanswered();
+        },
+      }),
+    onSuccess: async ({ bed, beds = bed ? [bed] : [] }, act) => {
       for (const changed of beds) await keepBed(queryClient, changed);
-      onRecorded(window.location.pathname === sentFrom.current);
+      onRecorded(act, window.location.pathname === sentFrom.current);
       await queryClient.invalidateQueries({ queryKey: ['record'] });
     },
     onError: (error) => {
       if (error instanceof ProblemError) onRefused(error);
+      else onUnanswered();
     },
   });
   const { mutate, variables, error } = mutation;

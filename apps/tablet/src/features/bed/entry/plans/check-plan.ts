@@ -17,8 +17,20 @@ const MODES = SUPPORT_CATALOGUE.map(({ id, shortName, fullName }) => ({
   label: `${shortName} · ${fullName}`,
 }));
 
-/** A whole check: the rows follow from the mode, in the order in which a ventilator is read. */
-export function checkPlan({ mode, earlier }: { mode: string; earlier: Earlier }): EntryPlan {
+/**
+ * A whole check: the rows follow from the mode, in the order in which a ventilator is read.
+ *
+ * @param standing the mode of the last check, where that check still holds on the board; null: none does.
+ */
+export function checkPlan({
+  mode,
+  earlier,
+  standing = null,
+}: {
+  mode: string;
+  earlier: Earlier;
+  standing?: string | null;
+}): EntryPlan {
   const entry = SUPPORT_CATALOGUE.find(({ id }) => id === mode) ?? null;
   return {
     kind: 'check',
@@ -31,16 +43,25 @@ export function checkPlan({ mode, earlier }: { mode: string; earlier: Earlier })
           choiceRow({ key: 'mode', label: 'Mode', options: MODES, earlier, needed: true, asList: true }),
         ],
       },
-      ...(entry ? sectionsOf(entry, earlier) : []),
+      ...(entry ? sectionsOf({ entry, earlier, mayRepeat: standing === mode }) : []),
       NOTE_SECTION,
     ],
     schema: Check,
     crossCheck: (values) => pressureOrder(pressuresOf(values)),
     bodyOf: (values) => bodyOf(values, entry),
+    onBoard: standing === null ? [] : Object.keys(READING_FIELDS),
   };
 }
 
-function sectionsOf(entry: SupportEntry, earlier: Earlier): EntrySection[] {
+function sectionsOf({
+  entry,
+  earlier,
+  mayRepeat,
+}: {
+  entry: SupportEntry;
+  earlier: Earlier;
+  mayRepeat: boolean;
+}): EntrySection[] {
   const settings = [
     ...entry.required.map((key) => numberRow({ key, field: SETTING_FIELDS[key], earlier, needed: true })),
     ...entry.optional.map((key) => numberRow({ key, field: SETTING_FIELDS[key], earlier })),
@@ -59,7 +80,7 @@ function sectionsOf(entry: SupportEntry, earlier: Earlier): EntrySection[] {
     earlier,
   });
   return [
-    { title: 'Settings', rows: entry.wantsInterface ? [...settings, mask] : settings },
+    { title: 'Settings', rows: entry.wantsInterface ? [...settings, mask] : settings, mayRepeat },
     // Only where a pause can be held does it matter whether the patient made an effort.
     { title: 'Readings', rows: entry.readings.includes('plateauCmH2O') ? [...readings, passive] : readings },
     { title: 'Alarm limits', rows: entry.limits.map((key) => limitRow(key, earlier)) },
