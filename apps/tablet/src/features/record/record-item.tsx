@@ -1,10 +1,10 @@
+import { amendState } from '@windrow/client/writes/amend-state';
 import { buttonClass } from '@windrow/ui/controls/button';
 import type { RecordEntry } from '@windrow/ventilation/contract/observations';
 import type { Session } from '@windrow/ventilation/contract/session';
 import { formatMoment } from '@windrow/ventilation/format/clock';
 import { may } from '@windrow/ventilation/permissions/permissions';
 import { Link } from 'react-router-dom';
-import { amendState } from '../bed/amend/amend-state.ts';
 import { mayBeAmended } from './amended-from.ts';
 import { entryInWords, KIND_WORDS } from './entry-in-words.ts';
 

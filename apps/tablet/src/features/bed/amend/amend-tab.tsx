@@ -1,3 +1,4 @@
+import { entryIn } from '@windrow/client/writes/amend-state';
 import { buttonClass } from '@windrow/ui/controls/button';
 import { SegmentedChoice } from '@windrow/ui/controls/segmented-tabs';
 import { EmptyState } from '@windrow/ui/controls/states';
@@ -9,7 +10,6 @@ import { EntryForm } from '../entry/entry-form.tsx';
 import { struckPlan } from '../entry/plans/stay-plans.ts';
 import { useThresholds } from '../use-thresholds.ts';
 import { amendPlan, isAmendable, textsOf } from './amend-plan.ts';
-import { entryIn } from './amend-state.ts';
 
 type As = 'corrected' | 'struck';
 
