@@ -72,6 +72,23 @@ describe('dailyMinimum', () => {
     expect(minimum([at('11:00', 5)])).toBe(8);
   });
 
+  it('holds a value no longer than it says, and refuses an end before its beginning', () => {
+    const at = (clock: string, value: number, until?: string) => ({
+      at: `${DAY}T${clock}:00Z`,
+      value,
+      ...(until !== undefined && { until: `${until}:00Z` }),
+    });
+    const minimum = (...samples: ReturnType<typeof at>[]) =>
+      dailyMinimum({ samples: [at('01:00', 8), ...samples], day: DAY, timeZone: 'UTC' });
+
+    expect(minimum(at('10:00', 5, `${DAY}T11:00`), at('20:00', 8))).toBe(8);
+    expect(minimum(at('10:00', 5, `${DAY}T11:01`), at('20:00', 8))).toBe(5);
+    expect(minimum(at('10:00', 5, `${DAY}T10:30`), at('11:00', 5, `${DAY}T11:45`))).toBe(8);
+    expect(minimum(at('10:00', 5, `${DAY}T11:00`), at('11:00', 5, `${DAY}T11:45`))).toBe(5);
+    expect(minimum(at('23:50', 5, '2024-03-06T00:05'))).toBe(8);
+    expect(() => minimum(at('10:00', 5, `${DAY}T09:59`))).toThrow(/^samples\[1\]\.until must not be before/);
+  });
+
   it('cuts days at midnight of the unit, not of the machine', () => {
     const samples = [
       { at: '2024-03-05T22:59:00Z', value: 12 },

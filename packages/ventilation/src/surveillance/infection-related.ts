@@ -1,30 +1,36 @@
 import { dayFromNumber, dayNumber } from '../units/calendar-day.ts';
 import { requireNumber, shown } from '../units/require-number.ts';
 import { requireList } from '../units/require-word.ts';
-import { qualifyingDaysOf } from './qualifying-days.ts';
+import { type EventWindow, eventWindow } from './event-window.ts';
+import { isTemperatureSign, isWhiteCellSign } from './infection-limits.ts';
+import { QUALIFYING_DAYS_NEEDED, qualifyingDaysOf, runFromWindow } from './qualifying-days.ts';
 import type { VentilatorEvent } from './ventilator-events.ts';
 
-const DAYS_AROUND_ONSET = 2;
-const FIRST_VENTILATION_DAY_THAT_COUNTS = 3;
-const QUALIFYING_DAYS_NEEDED = 4;
-
-type Window = { first: number; last: number };
-
 /**
- * Whether a ventilator-associated condition is infection-related. In the window from two days before to two days after onset,
- * never before the third day of ventilation: a temperature above 38.0 or below 36.0 °C, or white cells ≥ 12,000 or
- * ≤ 4,000 per mm³; and a new antimicrobial with at least four qualifying days in a row that begin in the window.
- * New means started in the window and not given on either of the two days before the start. Every day of a new agent
- * qualifies, also after the window, and one day left out between two days of the same agent; new agents add up.
+ * Whether a ventilator-associated condition is infection-related.
  *
- * @param input.event the event, with `onset` and `ventilationDayOne` as 'YYYY-MM-DD'.
- * @param input.temperatures `day` and `celsius` °C (20 to 46).
- * @param input.whiteCells `day` and `perMm3` cells per mm³ (0 to 1000000).
- * @param input.antimicrobialDays for each listed `agent` the `days` on which it was given, also those before the window.
- * @returns the verdict, and all qualifying days in order.
+ * @title Infection-related condition
+ * @formula in the window from two days before to two days after onset, never before the third day of
+ *   ventilation: a temperature `> 38.0` or `< 36.0 °C`, or white cells `≥ 12,000` or `≤ 4,000` per mm³; and a
+ *   new antimicrobial with at least four qualifying days in a row that begin in the window.
+ * @valid for an event of the same rule. New means started in the window and not given on either of the two days
+ *   before the start. Every day of a new agent qualifies, also after the window, and one day left out between
+ *   two days of the same agent; new agents add up.
+ *
+ * @param input.event record of the event, with `onset` and `ventilationDayOne` as YYYY-MM-DD.
+ * @param input.temperatures list of `day` and `celsius` °C (20 to 46).
+ * @param input.whiteCells list of `day` and `perMm3` cells per mm³ (0 to 1000000).
+ * @param input.antimicrobialDays list of each `agent` with the `days` on which it was given, also those before
+ *   the window.
+ * @returns record: `ivac` whether the condition is infection-related; `qualifyingDays` all qualifying days in
+ *   order.
  * @throws RangeError on missing, non-finite or impossible input, naming the place in the list.
+ * @example { "event": { "onset": "2026-03-08", "ventilationDayOne": "2026-03-01" }, "temperatures": [{ "day":
+ *   "2026-03-08", "celsius": 38.4 }], "whiteCells": [], "antimicrobialDays": [{ "agent": "A", "days":
+ *   ["2026-03-08", "2026-03-09", "2026-03-10", "2026-03-11"] }] }
  *
- * @source CDC NHSN, ventilator-associated event protocol (that the four days begin in the window from memory).
+ * @source CDC NHSN, ventilator-associated event protocol (that the four days begin in the window not compared
+ *   with the print).
  */
 export function infectionRelated({
   event,
@@ -37,7 +43,7 @@ export function infectionRelated({
   whiteCells: readonly { day: string; perMm3: number }[];
   antimicrobialDays: readonly { agent: string; days: readonly string[] }[];
 }): { ivac: boolean; qualifyingDays: string[] } {
-  const window = windowAround(event);
+  const window = eventWindow(event);
   const qualifying = qualifyingDaysOf({ window, courses: toCourses(antimicrobialDays) });
   // Both are checked before either answers, so that a wrong row is never passed over.
   const signs = [temperatureSign(temperatures, window), whiteCellSign(whiteCells, window)];
@@ -47,37 +53,30 @@ export function infectionRelated({
   };
 }
 
-function windowAround(event: { onset: string; ventilationDayOne: string }): Window {
-  const onset = dayNumber('event.onset', event?.onset);
-  const firstDay =
-    dayNumber('event.ventilationDayOne', event.ventilationDayOne) + FIRST_VENTILATION_DAY_THAT_COUNTS - 1;
-  if (onset < firstDay) {
-    throw new RangeError(`event.onset must be ${dayFromNumber(firstDay)} or later, not ${event.onset}`);
-  }
-  return { first: Math.max(firstDay, onset - DAYS_AROUND_ONSET), last: onset + DAYS_AROUND_ONSET };
-}
-
 function temperatureSign(
   rows: readonly { day: string; celsius: number }[],
-  { first, last }: Window,
+  { first, last }: EventWindow,
 ): boolean {
   requireList('temperatures', rows);
   return rows
     .map((row, index) => {
       const day = dayNumber(`temperatures[${index}].day`, row?.day);
       requireNumber(`temperatures[${index}].celsius`, row.celsius, [20, 46]);
-      return day >= first && day <= last && (row.celsius > 38 || row.celsius < 36);
+      return day >= first && day <= last && isTemperatureSign(row.celsius);
     })
     .includes(true);
 }
 
-function whiteCellSign(rows: readonly { day: string; perMm3: number }[], { first, last }: Window): boolean {
+function whiteCellSign(
+  rows: readonly { day: string; perMm3: number }[],
+  { first, last }: EventWindow,
+): boolean {
   requireList('whiteCells', rows);
   return rows
     .map((row, index) => {
       const day = dayNumber(`whiteCells[${index}].day`, row?.day);
       requireNumber(`whiteCells[${index}].perMm3`, row.perMm3, [0, 1_000_000]);
-      return day >= first && day <= last && (row.perMm3 >= 12_000 || row.perMm3 <= 4000);
+      return day >= first && day <= last && isWhiteCellSign(row.perMm3);
     })
     .includes(true);
 }
@@ -99,15 +98,4 @@ function toCourses(rows: readonly { agent: string; days: readonly string[] }[]):
     byAgent.set(row.agent, days);
   }
   return [...byAgent.values()];
-}
-
-/** The longest run of days in a row that begins within the window. */
-function runFromWindow(days: readonly number[], { last }: Window): number {
-  const given = new Set(days);
-  const starts = days.filter((day) => day <= last && !given.has(day - 1));
-  return starts.reduce((longest, start) => {
-    let end = start;
-    while (given.has(end)) end += 1;
-    return Math.max(longest, end - start);
-  }, 0);
 }

@@ -27,17 +27,25 @@ const EVENT_PERIOD_DAYS = 14;
 const HAIR = 1e-6;
 
 /**
- * Ventilator-associated conditions in a list of days. Two days of stable or falling daily minimum, then two days of which each
- * is at least 3 cmH2O (PEEP) or 20 points (FiO2) above the first of them, all four in a row and in one parameter. The onset
- * is the first worse day, so never before the third day of ventilation. Another onset needs 14 days from the last.
- * A day that is not listed, an excluded day and a missing minimum break a baseline.
+ * Ventilator-associated conditions in a list of days. The onset is the first worse day, so never before the
+ * third day of ventilation. Another onset needs 14 days from the last.
  *
- * @param input.days the days of mechanical ventilation through an artificial airway, in any order, each at most once:
- *   `day` 'YYYY-MM-DD'; `minPeep` cmH2O (0 to 40), `null` on a day wholly on alternating pressure levels;
- *   `minFio2Percent` % (20 to 100); `excluded` true for a day wholly on high-frequency ventilation or extracorporeal
- *   support.
- * @returns events in the order of their onset, with the parameters that met the rule on that day.
+ * @title Ventilator-associated events
+ * @formula two days of stable or falling daily minimum, then two days of which each is at least `3 cmH2O`
+ *   (PEEP) or `20 points` (FiO2) above the first of them, all four in a row and in one parameter; PEEP of 0 to
+ *   5 counts as 5.
+ * @valid for days of mechanical ventilation through an artificial airway. A day that is not listed, an excluded
+ *   day and a missing minimum break a baseline.
+ *
+ * @param input.days list of the days, in any order, each at most once: `day` YYYY-MM-DD; `minPeep` cmH2O (0 to
+ *   40), `null` on a day wholly on alternating pressure levels; `minFio2Percent` % (20 to 100); `excluded` true
+ *   for a day wholly on high-frequency ventilation or extracorporeal support.
+ * @returns list of the events in the order of their onset, each with the parameters that met the rule on that
+ *   day.
  * @throws RangeError on missing, non-finite or impossible input, naming the place in the list.
+ * @example { "days": [{ "day": "2026-03-01", "minPeep": 5, "minFio2Percent": 40 }, { "day": "2026-03-02",
+ *   "minPeep": 5, "minFio2Percent": 40 }, { "day": "2026-03-03", "minPeep": 8, "minFio2Percent": 40 }, { "day":
+ *   "2026-03-04", "minPeep": 9, "minFio2Percent": 45 }] }
  *
  * @source CDC NHSN, ventilator-associated event protocol and its calculator (first baseline day as reference).
  */
