@@ -1,5 +1,5 @@
 import { bedBoard } from '@windrow/ventilation/board/bed-board';
-import type { Stamped, StayFacts } from '@windrow/ventilation/board/facts';
+import { NOTHING_ACKNOWLEDGED, type Stamped, type StayFacts } from '@windrow/ventilation/board/facts';
 import type { Bed } from '@windrow/ventilation/contract/board';
 import { Airway, AirwayCheck, Check, Gas, Happening } from '@windrow/ventilation/contract/observations';
 import { DEFAULT_POLICY } from '@windrow/ventilation/policy/policy';
@@ -14,16 +14,51 @@ export function demoBoard({ hospital, now }: { hospital: DemoHospital; now: stri
         ({ unitKey, bedLabel, leftMinutesAgo }) =>
           unitKey === unit.key && bedLabel === bed.label && leftMinutesAgo === null,
       );
-      return bedBoard({
-        place: { ...bed, bedId: `${unit.key}-${bed.label}`, unitId: unit.key },
-        revision: 1,
-        facts: stay ? factsOf({ stay, hospital, now }) : null,
-        policy: DEFAULT_POLICY,
-        assignments: [],
-        ventilator: null,
-      });
+      const rowOf = (facts: StayFacts | null) =>
+        bedBoard({
+          place: { ...bed, bedId: `${unit.key}-${bed.label}`, unitId: unit.key },
+          revision: 1,
+          facts,
+          policy: DEFAULT_POLICY,
+          assignments: [],
+          ventilator: null,
+        });
+      if (!stay) return rowOf(null);
+      const facts = factsOf({ stay, hospital, now });
+      const row = rowOf(facts);
+      return stay.acknowledged ? rowOf({ ...facts, ...acknowledgedIn({ row, stay, hospital, now }) }) : row;
     }),
   );
+}
+
+/** Each fact of the demo was recorded before it was acknowledged, so nothing came in since. */
+function acknowledgedIn({
+  row,
+  stay: { key, acknowledged },
+  hospital,
+  now,
+}: {
+  row: Bed;
+  stay: DemoStay;
+  hospital: DemoHospital;
+  now: string;
+}): Pick<StayFacts, 'acknowledgements' | 'sinceAcknowledged'> {
+  const flag = row.stay?.flags.find(({ id }) => id === acknowledged?.flagId);
+  if (!acknowledged || !flag) throw new RangeError(`${key} acknowledges a flag that is not raised`);
+  const at = new Date(Date.parse(now) - acknowledged.minutesAgo * 60_000).toISOString();
+  return {
+    ...NOTHING_ACKNOWLEDGED,
+    acknowledgements: [
+      {
+        observationId: `${key}-acknowledgement`,
+        observedAt: at,
+        recordedAt: at,
+        recordedByInitials:
+          hospital.people.find(({ username }) => username === acknowledged.by)?.initials ?? '',
+        body: { observedAt: at, flagId: flag.id, fingerprint: flag.fingerprint, note: acknowledged.note },
+      },
+    ],
+  };
 }
 
 function factsOf({
@@ -66,5 +101,6 @@ function factsOf({
       sinceAt: at(support.sinceMinutesAgo),
       observedAt: at(support.sinceMinutesAgo),
     },
+    ...NOTHING_ACKNOWLEDGED,
   };
 }

@@ -224,14 +224,31 @@ describe('its board, as it opens', () => {
         'suction-catheter-small',
         'limit-off-low-vt',
         'limit-off-apnoea',
+        'limit-missing-low-vt',
         'limit-passed-high-rate',
         'limits-not-recorded',
         'rate-above-set',
         'expiratory-time-short',
       ]),
     );
+    const seen = flags.filter(({ acknowledged }) => acknowledged !== null);
+    expect(seen.map(({ id, level }) => [id, level])).toEqual([
+      ['pf-low', 'attention'],
+      ['suction-catheter-small', 'note'],
+    ]);
     const quiet = shown.filter(({ bed }) => bed.stay && bed.stay.flags.length === 0);
     expect(quiet.length).toBeGreaterThan(15);
+  });
+
+  it('records of most plateaus that the patient was passive, and shows those of which it is not said', () => {
+    const paused = shown.flatMap(({ bed }) =>
+      bed.stay?.check?.readings.plateauCmH2O === undefined ? [] : [bed.stay.check],
+    );
+    const passive = paused.map((check) => check.passive);
+    expect(new Set(passive)).toEqual(new Set([true, false, null]));
+    expect(passive.filter((is) => is === true).length).toBeGreaterThan(10);
+    for (const { passive: is, derived } of paused)
+      expect(derived.drivingPressureCmH2O !== null).toBe(is === true);
   });
 
   it('shows the beds that the demonstration speaks of', () => {

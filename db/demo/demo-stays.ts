@@ -20,6 +20,7 @@ export function demoStays({ now, shifts }: { now: string; shifts: readonly DemoS
   return planned.map(({ unitKey, plan }, index) => {
     const key = `${unitKey}-${plan.bed}${plan.left ? `-left-${minutes(plan.left.hoursAgo)}` : ''}`;
     const bedLabel = plan.bed;
+    const by = (minutesAgo: number) => authorOf({ unitKey, bedLabel, minutesAgo, shifts });
     return {
       key,
       unitKey,
@@ -28,7 +29,8 @@ export function demoStays({ now, shifts }: { now: string; shifts: readonly DemoS
       admittedMinutesAgo: minutes(plan.admittedHoursAgo),
       leftMinutesAgo: plan.left ? minutes(plan.left.hoursAgo) : null,
       outcome: plan.left?.outcome ?? null,
-      facts: recordOf({ key, plan, by: (minutesAgo) => authorOf({ unitKey, bedLabel, minutesAgo, shifts }) }),
+      facts: recordOf({ key, plan, by }),
+      acknowledged: plan.acknowledged ? { ...plan.acknowledged, by: by(plan.acknowledged.minutesAgo) } : null,
     };
   });
 }

@@ -37,6 +37,9 @@ export type DemoFact = {
   body: Record<string, unknown>;
 };
 
+/** Made by whoever has the bed, of the flag as it is when the hospital is filled. */
+export type DemoAcknowledgement = { flagId: string; minutesAgo: number; note: string };
+
 export type DemoStay = {
   key: string;
   unitKey: string;
@@ -47,6 +50,7 @@ export type DemoStay = {
   outcome: (typeof OUTCOMES)[number] | null;
   /** Oldest first. */
   facts: DemoFact[];
+  acknowledged: (DemoAcknowledgement & { by: string }) | null;
 };
 
 export type DemoVentilator = {

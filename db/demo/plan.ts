@@ -1,12 +1,15 @@
 import type {
   AirwayKind,
   GAS_SITES,
+  Happening,
   HappeningKind,
   MASK_INTERFACES,
 } from '@windrow/ventilation/contract/observations';
 import type { OUTCOMES } from '@windrow/ventilation/contract/stays';
 import type { GasKey, LimitKey, ReadingKey, SettingKey } from '@windrow/ventilation/entry/fields';
 import type { SupportId } from '@windrow/ventilation/support/catalogue';
+
+import type { DemoAcknowledgement } from './demo-types.ts';
 
 /** What the patient's lungs are like at the end of the story, and where they are going. */
 export type Lung = {
@@ -71,14 +74,22 @@ export type StayPlan = {
   newest: { check: number | null; airway: number | null; gas: number | null };
   gasesADay?: number;
   newestGasSite?: (typeof GAS_SITES)[number];
-  happenings?: { kind: HappeningKind; minutesAgo: number; detail?: string }[];
+  happenings?: ({ kind: HappeningKind; minutesAgo: number } & Pick<
+    Happening,
+    'detail' | 'method' | 'plannedMinutes' | 'minutes' | 'criteria' | 'screen'
+  >)[];
   /** What the newest facts say instead of what follows from the lungs. */
   found?: {
     settings?: Partial<Record<SettingKey, number>>;
     readings?: Partial<Record<ReadingKey, number>>;
-    limits?: Partial<Record<LimitKey, number | 'off'>> | 'none';
+    /** Null: not written down, while the others were. */
+    limits?: Partial<Record<LimitKey, number | 'off' | null>> | 'none';
+    /** Whether the patient made no effort in the pause; where it is not said here, they made none. */
+    passive?: boolean | 'not recorded';
     note?: string;
     airway?: { depthCm?: number; cuffCmH2O?: number; secured?: boolean };
     gas?: Partial<Record<GasKey, number>>;
   };
+  /** A flag of the newest facts that somebody has looked at. */
+  acknowledged?: DemoAcknowledgement;
 };

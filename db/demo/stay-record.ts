@@ -88,16 +88,28 @@ function checkBody({
   const limits =
     found?.limits === 'none'
       ? {}
-      : { ...alarmLimits({ mode: phase.mode, settings, readings }), ...found?.limits };
+      : written({ ...alarmLimits({ mode: phase.mode, settings, readings }), ...found?.limits });
   return {
     mode: phase.mode,
     settings,
     readings,
     limits,
     ...(phase.interface ? { interface: phase.interface } : {}),
-    ...(readings.plateauCmH2O === undefined ? {} : { passive: true }),
+    ...passiveOf(readings, found),
     ...(found?.note ? { note: found.note } : {}),
   };
+}
+
+function written<Limit>(limits: Record<string, Limit | null>): Record<string, Limit> {
+  const kept: Record<string, Limit> = {};
+  for (const [key, limit] of Object.entries(limits)) if (limit !== null) kept[key] = limit;
+  return kept;
+}
+
+/** Said wherever a plateau was read; now and then somebody forgets it, or the patient breathes in the pause. */
+function passiveOf({ plateauCmH2O }: { plateauCmH2O?: number }, found: StayPlan['found']) {
+  if (plateauCmH2O === undefined || found?.passive === 'not recorded') return {};
+  return { passive: found?.passive ?? true };
 }
 
 function gases(plan: StayPlan, random: Random): Unsigned[] {

@@ -41,8 +41,8 @@ export const ENDED_PLANS: { unitKey: string; plan: StayPlan }[] = [
       newest: { check: 260, airway: 1620, gas: 700 },
       gasesADay: 3,
       happenings: [
-        { kind: 'trial-started', minutesAgo: 1490 },
-        { kind: 'trial-passed', minutesAgo: 1458 },
+        { kind: 'trial-started', minutesAgo: 1490, method: 'pressure-support', plannedMinutes: 30 },
+        { kind: 'trial-passed', minutesAgo: 1458, minutes: 32 },
       ],
     },
   },

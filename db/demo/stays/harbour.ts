@@ -1,6 +1,7 @@
 import { aprv, highFlow, lowFlow, maskCpap, pc, psv, roomAir, simvVc, vc, vtpc } from '../phases.ts';
 import type { StayPlan } from '../plan.ts';
 import { patient } from './patient.ts';
+import { EVERY_ANSWER_YES } from './screened.ts';
 
 /** Harbour: every rung of the age ladder for checks, airways and gases. Beds 04 and 11 are empty. */
 export const HARBOUR_PLANS: StayPlan[] = [
@@ -48,8 +49,14 @@ export const HARBOUR_PLANS: StayPlan[] = [
     newest: { check: 25, airway: 158, gas: 370 },
     gasesADay: 3,
     happenings: [
-      { kind: 'trial-started', minutesAgo: 1700 },
-      { kind: 'trial-failed', minutesAgo: 1676, detail: 'Rate 38, restless' },
+      { kind: 'trial-started', minutesAgo: 1700, method: 't-piece', plannedMinutes: 30 },
+      {
+        kind: 'trial-failed',
+        minutesAgo: 1676,
+        criteria: ['rate', 'agitation'],
+        detail: 'Rate 38, restless',
+      },
+      { kind: 'screened', minutesAgo: 20, screen: EVERY_ANSWER_YES },
     ],
   },
   {
@@ -109,6 +116,7 @@ export const HARBOUR_PLANS: StayPlan[] = [
       { kind: 'supine', minutesAgo: 860, detail: 'After 16 h' },
       { kind: 'proned', minutesAgo: 312 },
     ],
+    acknowledged: { flagId: 'pf-low', minutesAgo: 20, note: 'Known to the team; turned prone for it' },
   },
   {
     bed: '06',
@@ -264,7 +272,10 @@ export const HARBOUR_PLANS: StayPlan[] = [
     ],
     newest: { check: 18, airway: 190, gas: 128 },
     gasesADay: 3,
-    happenings: [{ kind: 'trial-started', minutesAgo: 22 }],
+    happenings: [
+      { kind: 'screened', minutesAgo: 95, screen: EVERY_ANSWER_YES },
+      { kind: 'trial-started', minutesAgo: 22, method: 'pressure-support', plannedMinutes: 30 },
+    ],
   },
   {
     bed: '14',
@@ -290,8 +301,8 @@ export const HARBOUR_PLANS: StayPlan[] = [
     newest: { check: 118, airway: 1820, gas: 700 },
     gasesADay: 2,
     happenings: [
-      { kind: 'trial-started', minutesAgo: 1662 },
-      { kind: 'trial-passed', minutesAgo: 1632 },
+      { kind: 'trial-started', minutesAgo: 1662, method: 'pressure-support', plannedMinutes: 30 },
+      { kind: 'trial-passed', minutesAgo: 1632, minutes: 30 },
     ],
   },
   {

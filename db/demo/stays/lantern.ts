@@ -1,6 +1,7 @@
 import { collar, highFlow, lowFlow, psv, simvPc, tPiece, vc, vtpc } from '../phases.ts';
 import type { StayPlan } from '../plan.ts';
 import { patient } from './patient.ts';
+import { EVERY_ANSWER_YES } from './screened.ts';
 
 /** Lantern: eight beds, one patient away at a scan. Bed 07 is empty. */
 export const LANTERN_PLANS: StayPlan[] = [
@@ -40,6 +41,7 @@ export const LANTERN_PLANS: StayPlan[] = [
     tubes: [{ placedHoursAgo: 18.5, kind: 'oral-tube', sizeMm: 8, depthCm: 24 }],
     phases: [vc({ from: 18.5, perKg: 6.3, rate: 18, peep: 6, fio2: 40 })],
     newest: { check: 40, airway: 265, gas: 95 },
+    found: { passive: false },
     gasesADay: 6,
     happenings: [
       { kind: 'left-for-transport', minutesAgo: 980, detail: 'CT' },
@@ -88,7 +90,7 @@ export const LANTERN_PLANS: StayPlan[] = [
     ],
     newest: { check: 32, airway: 210, gas: 395 },
     gasesADay: 3,
-    happenings: [{ kind: 'trial-started', minutesAgo: 41, detail: 'T-piece' }],
+    happenings: [{ kind: 'trial-started', minutesAgo: 41, method: 't-piece', plannedMinutes: 60 }],
   },
   {
     bed: '05',
@@ -134,6 +136,7 @@ export const LANTERN_PLANS: StayPlan[] = [
     ],
     newest: { check: 222, airway: 425, gas: 230 },
     gasesADay: 3,
+    happenings: [{ kind: 'screened', minutesAgo: 300, screen: EVERY_ANSWER_YES }],
     found: { limits: { apnoeaS: 'off' } },
   },
   {

@@ -81,6 +81,7 @@ export const ORCHARD_FAR_PLANS: StayPlan[] = [
       pc({ from: 10, above: 13, rate: 20, peep: 10, fio2: 50 }),
     ],
     newest: { check: 170, airway: 205, gas: 160 },
+    found: { limits: { lowVtMl: null } },
     gasesADay: 4,
   },
   {

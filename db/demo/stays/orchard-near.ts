@@ -1,6 +1,7 @@
 import { hfov, highFlow, maskSt, psv, vc, vtpc } from '../phases.ts';
 import type { StayPlan } from '../plan.ts';
 import { patient } from './patient.ts';
+import { EVERY_ANSWER_YES } from './screened.ts';
 
 /** Orchard, beds 01 to 11; 09 is closed. */
 export const ORCHARD_NEAR_PLANS: StayPlan[] = [
@@ -22,6 +23,7 @@ export const ORCHARD_NEAR_PLANS: StayPlan[] = [
       vc({ from: 27, perKg: 6.2, rate: 18, peep: 8, fio2: 40 }),
     ],
     newest: { check: 55, airway: 240, gas: 150 },
+    found: { passive: 'not recorded' },
   },
   {
     bed: '02',
@@ -63,6 +65,11 @@ export const ORCHARD_NEAR_PLANS: StayPlan[] = [
       vtpc({ from: 22, perKg: 6.3, rate: 18, peep: 6, fio2: 40 }),
     ],
     newest: { check: 120, airway: 120, gas: 260 },
+    acknowledged: {
+      flagId: 'suction-catheter-small',
+      minutesAgo: 80,
+      note: '8 Fr catheters are at the bed',
+    },
   },
   {
     bed: '04',
@@ -106,8 +113,9 @@ export const ORCHARD_NEAR_PLANS: StayPlan[] = [
     ],
     newest: { check: 70, airway: 300, gas: 66 },
     happenings: [
-      { kind: 'trial-started', minutesAgo: 96 },
-      { kind: 'trial-passed', minutesAgo: 62 },
+      { kind: 'screened', minutesAgo: 150, screen: EVERY_ANSWER_YES },
+      { kind: 'trial-started', minutesAgo: 96, method: 'pressure-support', plannedMinutes: 30 },
+      { kind: 'trial-passed', minutesAgo: 62, minutes: 34 },
     ],
   },
   {
@@ -205,6 +213,7 @@ export const ORCHARD_NEAR_PLANS: StayPlan[] = [
       psv({ from: 17, perKg: 7.2, total: 19, ps: 8, peep: 5, fio2: 35 }),
     ],
     newest: { check: 20, airway: 260, gas: 175 },
+    happenings: [{ kind: 'screened', minutesAgo: 15, screen: { ...EVERY_ANSWER_YES, coughAdequate: false } }],
     found: { limits: 'none' },
   },
 ];

@@ -3,11 +3,16 @@ import { requireNumbers } from '../units/require-number.ts';
 const BAND_MMHG = 2;
 
 /**
- * The CO2 pressure to which a metabolic acidosis should drive the breathing: `1.5 × HCO3 + 8 ± 2`.
- * Above the band the patient does not keep up; below it something else drives. Valid in metabolic acidosis only.
+ * The CO2 pressure to which a metabolic acidosis should drive the breathing. Above the band the patient does
+ * not keep up; below it something else drives.
+ *
+ * @title Expected PaCO2 (Winters)
+ * @formula `1.5 × HCO3 + 8 ± 2`.
+ * @valid in metabolic acidosis only.
  *
  * @param input.bicarbonateMmolL bicarbonate, mmol/L (1 to 100).
- * @returns low, mid and high, mmHg.
+ * @returns record: `low` lower end of the band, mmHg; `mid` middle of the band, mmHg; `high` upper end of the
+ *   band, mmHg.
  * @throws RangeError on missing, non-finite or impossible input.
  *
  * @source Albert MS, Dell RB, Winters RW, Ann Intern Med 1967;66:312–22, as rounded at the bedside.

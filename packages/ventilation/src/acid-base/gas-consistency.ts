@@ -16,16 +16,23 @@ export type GasConsistency = {
 };
 
 /**
- * Whether pH, CO2 and bicarbonate can belong to one sample: `expected pH = 6.1 + log10(HCO3 ÷ (0.03 × PaCO2))`, and
- * consistent when the measured pH is within 0.04 of it. If not, one of the three was mistyped.
+ * Whether pH, CO2 and bicarbonate can belong to one sample. If not, one of the three was mistyped.
+ *
+ * @title Consistency of a gas
+ * @formula `expected pH = 6.1 + log10(HCO3 ÷ (0.03 × PaCO2))`; consistent when the measured pH is within 0.04
+ *   of it.
+ * @valid for one sample at 37 °C; the band is wider than the two constants in use and the rounding of three
+ *   printed values.
  *
  * @param input.ph pH (6.5 to 8).
  * @param input.paco2MmHg CO2 pressure, mmHg (5 to 250).
  * @param input.bicarbonateMmolL bicarbonate, mmol/L (1 to 100).
- * @returns expected pH, the signed difference in pH, and the verdict.
+ * @returns record: `expectedPh` pH that would follow from the other two; `difference` measured less expected
+ *   pH; `consistent` whether the three fit.
  * @throws RangeError on missing, non-finite or impossible input.
  *
- * @source Henderson–Hasselbalch equation; the 10 % band is common practice (from memory).
+ * @source Henderson–Hasselbalch equation.
+ * @source common practice, for the band of 10 % (not compared with the print).
  */
 export function gasConsistency({
   ph,

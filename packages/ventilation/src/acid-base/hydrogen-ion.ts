@@ -1,7 +1,11 @@
 import { requireNumbers } from '../units/require-number.ts';
 
 /**
- * Hydrogen-ion concentration for a pH: `10^(9 − pH)`.
+ * Hydrogen-ion concentration for a pH.
+ *
+ * @title Hydrogen ion
+ * @formula `10^(9 − pH)`.
+ * @valid for any pH.
  *
  * @param input.ph pH (6.5 to 8).
  * @returns nmol/L.

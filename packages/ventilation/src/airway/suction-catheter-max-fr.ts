@@ -4,15 +4,19 @@ import { requireNumbers } from '../units/require-number.ts';
 const FR_PER_MM = 1.5;
 
 /**
- * The largest suction catheter for a tube, at half of its inner diameter: `1.5 × ID`.
- * Valid for children and adults. The guideline says less than half, which refuses a catheter of exactly this size;
- * common practice takes it.
+ * The largest suction catheter for a tube, at half of its inner diameter. The guideline says less than half,
+ * which refuses a catheter of exactly this size; common practice takes it.
+ *
+ * @title Largest suction catheter
+ * @formula `1.5 × ID`.
+ * @valid for children and adults.
  *
  * @param input.tubeInternalDiameterMm inner diameter of the tube, mm (2 to 12).
  * @returns Fr, between catalogue sizes as it falls.
  * @throws RangeError on missing, non-finite or impossible input.
  *
- * @source AARC clinical practice guideline on endotracheal suctioning, Respir Care 2010;55:758–64; common practice.
+ * @source AARC clinical practice guideline on endotracheal suctioning, Respir Care 2010;55:758–64.
+ * @source common practice.
  */
 export function suctionCatheterMaxFr({ tubeInternalDiameterMm }: { tubeInternalDiameterMm: number }): number {
   requireNumbers({ tubeInternalDiameterMm });

@@ -20,19 +20,23 @@ const FORMS = {
 } as const;
 
 /**
- * Oxygen pressure in the alveoli. Full form `FiO2 × (Pb − 47) − PaCO2 × (FiO2 + (1 − FiO2) ÷ R)`; simplified form
- * `FiO2 × (Pb − 47) − PaCO2 ÷ R`, which reads lower as FiO2 rises. Valid in a steady state at 37 °C.
+ * Oxygen pressure in the alveoli. The simplified form reads lower as FiO2 rises.
+ *
+ * @title Alveolar oxygen pressure
+ * @formula full form `FiO2 × (Pb − 47) − PaCO2 × (FiO2 + (1 − FiO2) ÷ R)`; simplified form `FiO2 × (Pb − 47) −
+ *   PaCO2 ÷ R`.
+ * @valid in a steady state at 37 °C.
  *
  * @param input.fio2 inspired oxygen, fraction (0.21 to 1), not a percentage.
  * @param input.paco2MmHg arterial CO2 pressure, mmHg (5 to 250).
  * @param input.barometricMmHg pressure of the air, mmHg (200 to 900); 760 unless given.
- * @param input.respiratoryQuotient CO2 made per oxygen used, R (0.5 to 1.5); 0.8 unless given.
- * @param input.form 'full' unless 'simplified' is given.
+ * @param input.respiratoryQuotient CO2 made per oxygen used (0.5 to 1.5); 0.8 unless given.
+ * @param input.form form of the equation: 'simplified' or 'full'; 'full' unless given.
  * @returns mmHg, above zero.
- * @throws RangeError on missing, non-finite or impossible input; also when this much CO2 would leave no room for
- *   oxygen.
+ * @throws RangeError on missing, non-finite or impossible input; also when this much CO2 would leave no room
+ *   for oxygen.
  *
- * @source alveolar gas equation; the full form from memory.
+ * @source alveolar gas equation; the full form (not compared with the print).
  */
 export function alveolarOxygen({
   fio2,

@@ -22,24 +22,30 @@ const JUDGED = {
 } as const satisfies Record<Support, (strength: Strength) => boolean>;
 
 /**
- * The oxygenation part of the global definition of ARDS of 2023. Intubated: P/F up to 100 severe, 200 moderate, 300 mild, or
- * S/F up to 148, 235, 315. Not intubated: one class, at P/F up to 300 or S/F up to 315, on high flow of at least
- * 30 L/min or a mask with at least 5 cmH2O. P/F decides when both are given. Where resources are limited no PEEP and no
- * flow is asked for. Onset, opacities and origin are for people to judge.
+ * The oxygenation part of the global definition of ARDS of 2023. Onset, opacities and origin are for people to
+ * judge.
  *
- * @param input.pfMmHg PaO2/FiO2, mmHg (1 to 4000); or instead of it the next two.
- * @param input.spo2Percent pulse oximeter saturation, % (20 to 100), valid up to 97.
- * @param input.fio2 inspired oxygen, fraction (0.21 to 1), not a percentage.
- * @param input.support 'invasive', 'mask', 'high-flow' or 'none'.
- * @param input.peepCmH2O PEEP or CPAP, cmH2O (0 to 120); must be given for a mask to count.
- * @param input.flowLMin high-flow rate, L/min (0 to 300); must be given for high flow to count.
- * @param input.resourceLimited true waives PEEP and flow.
- * @returns the class, 'non-intubated' without a grade; `null` where the definition cannot be applied: support too weak
- *   or unknown, or SpO2 above 97 %.
+ * @title ARDS class, global definition
+ * @formula intubated: P/F `≤ 100` severe, `≤ 200` moderate, `≤ 300` mild, or S/F `≤ 148`, `≤ 235`, `≤ 315`; not
+ *   intubated: one class, at P/F `≤ 300` or S/F `≤ 315`; P/F decides when both are given.
+ * @valid intubated at a PEEP of at least 5 cmH2O; else on high flow of at least 30 L/min or a mask with at
+ *   least 5 cmH2O. Where resources are limited no PEEP and no flow is asked for. S/F only up to an SpO2 of 97
+ *   %.
+ *
+ * @param input.pfMmHg PaO2/FiO2, mmHg (1 to 4000); may be left out when the next two are given.
+ * @param input.spo2Percent pulse oximeter saturation, % (20 to 100), valid up to 97; may be left out when P/F
+ *   is given.
+ * @param input.fio2 inspired oxygen, fraction (0.21 to 1), not a percentage; may be left out when P/F is given.
+ * @param input.support support: 'invasive', 'mask', 'high-flow' or 'none'.
+ * @param input.peepCmH2O PEEP or CPAP, cmH2O (0 to 120); may be left out, but not for a mask to count.
+ * @param input.flowLMin high-flow rate, L/min (0 to 300); may be left out, but not for high flow to count.
+ * @param input.resourceLimited whether resources are limited, which waives PEEP and flow; false unless given.
+ * @returns class: 'none', 'mild', 'moderate', 'severe', or 'non-intubated' without a grade; `null` where the
+ *   definition cannot be applied: support too weak or unknown, or SpO2 above 97 %.
  * @throws RangeError on missing, non-finite or impossible input.
  *
- * @source Matthay MA et al., Am J Respir Crit Care Med 2024;209:37–47 (read in a secondary page; the minimum PEEP of
- *   the intubated from memory).
+ * @source Matthay MA et al., Am J Respir Crit Care Med 2024;209:37–47 (read in a secondary page; the minimum
+ *   PEEP of the intubated not compared with the print).
  */
 export function globalArdsClass({
   support,

@@ -1,7 +1,11 @@
 import { requireNumbers } from '../units/require-number.ts';
 
 /**
- * Oxygenation index without a gas: `mean airway pressure × FiO2 × 100 ÷ SpO2`. Valid up to an SpO2 of 97 %.
+ * Oxygenation index without a gas.
+ *
+ * @title Oxygen saturation index
+ * @formula `mean airway pressure × FiO2 × 100 ÷ SpO2`.
+ * @valid up to an SpO2 of 97 %.
  *
  * @param input.meanAirwayPressureCmH2O mean airway pressure, cmH2O (0 to 120).
  * @param input.fio2 inspired oxygen, fraction (0.21 to 1), not a percentage.

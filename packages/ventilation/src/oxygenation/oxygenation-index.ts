@@ -1,7 +1,12 @@
 import { requireNumbers } from '../units/require-number.ts';
 
 /**
- * Oxygenation for the airway pressure it takes; higher is worse: `mean airway pressure × FiO2 × 100 ÷ PaO2`.
+ * Oxygenation for the airway pressure it takes; higher is worse.
+ *
+ * @title Oxygenation index
+ * @formula `mean airway pressure × FiO2 × 100 ÷ PaO2`.
+ * @valid for arterial samples in children and adults on positive pressure, with the mean airway pressure as
+ *   read.
  *
  * @param input.meanAirwayPressureCmH2O mean airway pressure, cmH2O (0 to 120).
  * @param input.fio2 inspired oxygen, fraction (0.21 to 1), not a percentage.

@@ -31,17 +31,22 @@ const LADDERS = {
 const SAME_FIO2 = 0.001;
 
 /**
- * Where settings stand on a PEEP–FiO2 ladder of the ARDS Network. On the ladder means that the FiO2 is one of its steps
- * and the PEEP lies within that step's range, ends included.
+ * Where settings stand on a PEEP–FiO2 ladder of the ARDS Network.
+ *
+ * @title PEEP–FiO2 ladder
+ * @formula on the ladder when the FiO2 is one of its steps (30, 40, … 100 %) and the PEEP lies within that
+ *   step’s range, ends included.
+ * @valid for the two ladders as printed; neither is an order.
  *
  * @param input.peepCmH2O set PEEP, cmH2O (0 to 120).
  * @param input.fio2 set oxygen, fraction (0.21 to 1), not a percentage.
- * @param input.ladder 'lower' (lower PEEP, higher FiO2) or 'higher'.
- * @returns whether the pair is on the ladder, and the PEEP range (cmH2O) at this FiO2; `null` for an FiO2 between steps.
+ * @param input.ladder ladder: 'lower' or 'higher'; 'lower' has the lower PEEP at the higher FiO2.
+ * @returns record: `onLadder` whether the pair is on the ladder; `peepRange` lowest and highest PEEP at this
+ *   FiO2, cmH2O; `null` for the range means an FiO2 between steps.
  * @throws RangeError on missing, non-finite or impossible input.
  *
- * @source lower: ARDS Network, N Engl J Med 2000;342:1301–8, and the protocol card (18–24 at 1.0);
- *   higher: N Engl J Med 2004;351:327–36 (from memory).
+ * @source ARDS Network, N Engl J Med 2000;342:1301–8, and the protocol card (18–24 at 1.0), for the lower.
+ * @source N Engl J Med 2004;351:327–36 (not compared with the print), for the higher.
  */
 export function peepFio2Step({
   peepCmH2O,

@@ -1,7 +1,11 @@
 import { requireNumbers } from '../units/require-number.ts';
 
 /**
- * How well oxygen crosses into the blood for the oxygen given: `PaO2 ÷ FiO2`.
+ * How well oxygen crosses into the blood for the oxygen given.
+ *
+ * @title P/F ratio
+ * @formula `PaO2 ÷ FiO2`.
+ * @valid for an arterial sample, with the oxygen fraction as it was at the draw.
  *
  * @param input.pao2MmHg arterial oxygen pressure, mmHg (10 to 700).
  * @param input.fio2 inspired oxygen, fraction (0.21 to 1), not a percentage.

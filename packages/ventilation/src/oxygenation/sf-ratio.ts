@@ -4,7 +4,11 @@ import { requireNumbers } from '../units/require-number.ts';
 const HIGHEST_SPO2 = 97;
 
 /**
- * Oxygenation without a gas: `SpO2 (%) ÷ FiO2`. Valid up to an SpO2 of 97 %.
+ * Oxygenation without a gas.
+ *
+ * @title S/F ratio
+ * @formula `SpO2 (%) ÷ FiO2`.
+ * @valid up to an SpO2 of 97 %; above it the dissociation curve is flat.
  *
  * @param input.spo2Percent pulse oximeter saturation, % (20 to 100).
  * @param input.fio2 inspired oxygen, fraction (0.21 to 1), not a percentage.
