@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { ACID_BASE } from './covered/acid-base.ts';
 import { MECHANICS } from './covered/mechanics.ts';
 import { OXYGENATION } from './covered/oxygenation.ts';
+import { READINESS } from './covered/readiness.ts';
 import { SCORES_AND_SUPPLY } from './covered/scores-and-supply.ts';
 import { SURVEILLANCE } from './covered/surveillance.ts';
 import { NOT_COVERED, PARTLY_COVERED } from './not-covered.ts';
@@ -14,6 +15,7 @@ const COVERED: readonly (readonly [RegExp, (row: Row) => void])[] = [
   ...ACID_BASE,
   ...SURVEILLANCE,
   ...SCORES_AND_SUPPLY,
+  ...READINESS,
 ];
 
 const reasons = new Map(NOT_COVERED.flatMap(({ ids, reason }) => ids.map((id) => [id, reason] as const)));

@@ -10,6 +10,7 @@ import {
   pfRatio,
   sfRatio,
 } from '@windrow/ventilation';
+import { ladderPosition } from '@windrow/ventilation/oxygenation/peep-fio2-ladders';
 import { expect } from 'vitest';
 import { numberAt, numbersAt, type Row, textAt } from '../rows.ts';
 import { type Check, expectNear } from './expectations.ts';
@@ -119,6 +120,7 @@ export const OXYGENATION: readonly Check[] = [
       for (const [fio2, peepCmH2O] of pairs) {
         expect(peepFio2Step({ fio2, peepCmH2O, ladder }).onLadder, `${fio2}/${peepCmH2O}`).toBe(true);
       }
+      expect(walkedUp(ladder)).toEqual(pairs);
     },
   ],
   [
@@ -138,6 +140,18 @@ export const OXYGENATION: readonly Check[] = [
     },
   ],
 ];
+
+/** Every step of a ladder, from below it to its end. */
+function walkedUp(ladder: 'lower' | 'higher'): [fio2: number, peepCmH2O: number][] {
+  const steps: [number, number][] = [];
+  let { up } = ladderPosition({ fio2: 0.21, peepCmH2O: 0, ladder });
+  while (up) {
+    const fio2 = up.fio2Percent / 100;
+    steps.push([fio2, up.peepCmH2O]);
+    ({ up } = ladderPosition({ fio2, peepCmH2O: up.peepCmH2O, ladder }));
+  }
+  return steps;
+}
 
 function ladderOf(row: Row): 'lower' | 'higher' {
   return row.id.startsWith('PEEP-LOW') ? 'lower' : 'higher';

@@ -12,16 +12,21 @@ const MINUTE_MS = 60_000;
 const YEAR_MIN = 527_040;
 
 /**
- * Where a fact stands on the age ladder: `age = now − observedAt`, and a boundary belongs to the older state.
- * `current < dueFrom ≤ due < overdueFrom ≤ overdue < withdrawFrom ≤ withdrawn`. Equal boundaries leave a state out.
- * An age below zero (two clocks that disagree) counts as zero.
+ * Where a fact stands on the age ladder. An age below zero (two clocks that disagree) counts as zero.
  *
- * @param input.kind the kind of fact; must be a key of the policy.
- * @param input.observedAt when it was true, ISO 8601 with offset; `null` when nothing was ever recorded.
- * @param input.now the server's clock, ISO 8601 with offset.
- * @param input.policy for each kind the three ages, minutes (0 to 527040), ascending.
- * @returns the state; 'never' when `observedAt` is `null`.
+ * @title Freshness of a fact
+ * @formula `age = now − observedAt`; `current < dueFrom ≤ due < overdueFrom ≤ overdue < withdrawFrom ≤
+ *   withdrawn`.
+ * @valid for any fact with a time. A boundary belongs to the older state; equal boundaries leave a state out.
+ *
+ * @param input.kind kind of fact, text, a key of the policy.
+ * @param input.observedAt when it was true, text, ISO 8601 with offset; `null` when nothing was ever recorded.
+ * @param input.now the server’s clock, text, ISO 8601 with offset.
+ * @param input.policy record of each kind’s three ages, minutes (0 to 527040), ascending.
+ * @returns state: 'current', 'due', 'overdue' or 'withdrawn', and 'never' when `observedAt` is `null`.
  * @throws RangeError on a kind without a policy, text that is no instant, or ages that do not ascend.
+ * @example { "kind": "check", "observedAt": "2026-03-05T06:00:00Z", "now": "2026-03-05T10:00:00Z", "policy": {
+ *   "check": { "dueFrom": 210, "overdueFrom": 240, "withdrawFrom": 480 } } }
  *
  * @source common practice; each unit sets its own ages.
  */

@@ -3,8 +3,11 @@ import { requireNumber, requireNumbers } from '../units/require-number.ts';
 const SECONDS_PER_MINUTE = 60;
 
 /**
- * Pressure lost to flow in tube and airways: `(peakCmH2O − plateauCmH2O) ÷ flow in L/s`.
- * Valid in volume control with constant (square) flow and a passive patient.
+ * Pressure lost to flow in tube and airways.
+ *
+ * @title Airway resistance
+ * @formula `(peakCmH2O − plateauCmH2O) ÷ flow in L/s`.
+ * @valid in volume control with constant (square) flow and a passive patient.
  *
  * @param input.peakCmH2O peak airway pressure, cmH2O (0 to 120).
  * @param input.plateauCmH2O plateau pressure, cmH2O (0 to 120), not above the peak.

@@ -11,12 +11,16 @@ export type BreathTiming = {
 };
 
 /**
- * How a breath divides: `cycle = 60 ÷ rate`, `expiratory = cycle − inspiratory`, `E per I = expiratory ÷ inspiratory`.
- * Valid for the rate that the patient really has: the total rate, or the set rate when nobody triggers.
+ * How a breath divides into breathing in and breathing out.
+ *
+ * @title Breath timing
+ * @formula `cycle = 60 ÷ rate`, `expiratory = cycle − inspiratory`, `E per I = expiratory ÷ inspiratory`.
+ * @valid for the rate that the patient really has: the total rate, or the set rate when nobody triggers.
  *
  * @param input.ratePerMin breaths, /min (1 to 200).
  * @param input.inspiratoryTimeS inspiratory time, s (0.05 to 60), shorter than the cycle.
- * @returns seconds, and E per I without unit.
+ * @returns record: `cycleS` from one breath to the next, s; `expiratoryTimeS` time to breathe out, s;
+ *   `expiratoryPerInspiratory` E in 1:E.
  * @throws RangeError on missing, non-finite or impossible input; also when no time is left to breathe out.
  *
  * @source definition.

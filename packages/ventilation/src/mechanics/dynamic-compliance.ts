@@ -1,8 +1,11 @@
 import { requireNumbers } from '../units/require-number.ts';
 
 /**
- * Compliance without a pause: `tidalVolumeMl ÷ (peakCmH2O − peepCmH2O)`. It holds resistance too, so only its trend
- * means anything.
+ * Compliance without a pause. It holds resistance too, so only its trend means anything.
+ *
+ * @title Dynamic compliance
+ * @formula `tidalVolumeMl ÷ (peakCmH2O − peepCmH2O)`.
+ * @valid as a trend in one patient, while flow and airways stay as they are.
  *
  * @param input.tidalVolumeMl exhaled tidal volume, mL (1 to 3000).
  * @param input.peakCmH2O peak airway pressure, cmH2O (0 to 120).

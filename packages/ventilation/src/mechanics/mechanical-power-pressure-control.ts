@@ -2,9 +2,11 @@ import { requireNumbers } from '../units/require-number.ts';
 import { JOULES_PER_L_CMH2O } from './joules.ts';
 
 /**
- * Energy given to the respiratory system each minute in pressure control:
- * `0.098 × rate × VT (L) × (inspiratory pressure above PEEP + PEEP)`.
- * Valid for a square pressure wave and a passive patient; it reads high with a slow rise (mean error 19 %).
+ * Energy given to the respiratory system each minute in pressure control.
+ *
+ * @title Mechanical power, pressure control
+ * @formula `0.098 × rate × VT (L) × (inspiratory pressure above PEEP + PEEP)`.
+ * @valid for a square pressure wave and a passive patient; it reads high with a slow rise (mean error 19 %).
  *
  * @param input.ratePerMin total rate, /min (0 to 200).
  * @param input.tidalVolumeMl exhaled tidal volume, mL (1 to 3000).
@@ -13,8 +15,8 @@ import { JOULES_PER_L_CMH2O } from './joules.ts';
  * @returns J/min.
  * @throws RangeError on missing, non-finite or impossible input.
  *
- * @source Becher T et al., Intensive Care Med 2019;45:1321–3, simplified form (from memory);
- *   error: Trinkle CA et al. 2022.
+ * @source Becher T et al., Intensive Care Med 2019;45:1321–3, simplified form (not compared with the print).
+ * @source Trinkle CA et al. 2022, for the error.
  */
 export function mechanicalPowerPressureControl({
   ratePerMin,

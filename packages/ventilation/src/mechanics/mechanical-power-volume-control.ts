@@ -2,9 +2,12 @@ import { requireNumber, requireNumbers } from '../units/require-number.ts';
 import { JOULES_PER_L_CMH2O } from './joules.ts';
 
 /**
- * Energy given to the respiratory system each minute in volume control:
- * `0.098 × rate × VT (L) × (peak − ½ × (plateau − PEEP))`.
- * Valid with constant flow and a passive patient. Risk rose above 17 J/min in one large cohort; show it as a trend.
+ * Energy given to the respiratory system each minute in volume control. Risk rose above 17 J/min in one large
+ * cohort; show it as a trend.
+ *
+ * @title Mechanical power, volume control
+ * @formula `0.098 × rate × VT (L) × (peak − ½ × (plateau − PEEP))`.
+ * @valid with constant flow and a passive patient.
  *
  * @param input.ratePerMin total rate, /min (0 to 200).
  * @param input.tidalVolumeMl tidal volume, mL (1 to 3000).
@@ -14,8 +17,9 @@ import { JOULES_PER_L_CMH2O } from './joules.ts';
  * @returns J/min.
  * @throws RangeError on missing, non-finite or impossible input; also when PEEP ≤ plateau ≤ peak does not hold.
  *
- * @source Gattinoni L et al., Intensive Care Med 2016;42:1567–75, simplified form (from memory);
- *   threshold: Serpa Neto A et al., Intensive Care Med 2018.
+ * @source Gattinoni L et al., Intensive Care Med 2016;42:1567–75, simplified form (not compared with the
+ *   print).
+ * @source Serpa Neto A et al., Intensive Care Med 2018, for the threshold.
  */
 export function mechanicalPowerVolumeControl({
   ratePerMin,

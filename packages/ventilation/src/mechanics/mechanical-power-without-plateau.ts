@@ -1,8 +1,11 @@
 import { requireNumber, requireNumbers } from '../units/require-number.ts';
 
 /**
- * Mechanical power in volume control when nobody made a pause: `VE × (peak + PEEP + flow ÷ 6) ÷ 20`.
- * Valid with constant flow and a passive patient.
+ * Mechanical power in volume control when nobody made a pause.
+ *
+ * @title Mechanical power without a plateau
+ * @formula `VE × (peak + PEEP + flow ÷ 6) ÷ 20`.
+ * @valid with constant flow and a passive patient.
  *
  * @param input.minuteVentilationLMin minute volume, L/min (0 to 300).
  * @param input.peakCmH2O peak airway pressure, cmH2O (0 to 120).

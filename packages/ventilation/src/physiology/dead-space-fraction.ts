@@ -1,8 +1,11 @@
 import { requireNumber, requireNumbers } from '../units/require-number.ts';
 
 /**
- * The part of each breath that takes up no CO2: `(PaCO2 − PĒCO2) ÷ PaCO2`.
- * Valid with mixed expired CO2 from the whole breath; an end-tidal value is not one.
+ * The part of each breath that takes up no CO2.
+ *
+ * @title Dead space fraction
+ * @formula `(PaCO2 − PĒCO2) ÷ PaCO2`.
+ * @valid with mixed expired CO2 from the whole breath; an end-tidal value is not one.
  *
  * @param input.paco2MmHg arterial CO2 pressure, mmHg (5 to 250).
  * @param input.mixedExpiredPco2MmHg mixed expired CO2 pressure, mmHg (0 to 250), not above the arterial one.

@@ -1,7 +1,11 @@
 import { requireNumbers } from '../units/require-number.ts';
 
 /**
- * Gas moved each minute: `ratePerMin × tidalVolumeMl ÷ 1000`. Exhaled volume and total rate.
+ * Gas moved each minute.
+ *
+ * @title Minute ventilation
+ * @formula `ratePerMin × tidalVolumeMl ÷ 1000`.
+ * @valid with the exhaled volume and the total rate, where all breaths are alike.
  *
  * @param input.ratePerMin total breaths, /min (0 to 200).
  * @param input.tidalVolumeMl exhaled tidal volume, mL (1 to 3000).

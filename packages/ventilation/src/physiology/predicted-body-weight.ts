@@ -12,12 +12,15 @@ const FORMS = {
 } as const;
 
 /**
- * Body weight predicted from height and sex, by which a tidal volume is judged (lung size follows height, not weight).
- * `50 (male) or 45.5 (female) + 2.3 ÷ 2.54 × (heightCm − 152.4)`, the inch form of the published bedside chart; the
- * often printed 0.91 per cm is up to 0.2 kg higher in tall adults.
- * Valid for adults; fitted from 152 cm up, and the chart extends it to 140 cm.
+ * Body weight predicted from height and sex, by which a tidal volume is judged: lung size follows height, not
+ * weight.
  *
- * @param input.sex 'male' or 'female', as used for lung size.
+ * @title Predicted body weight
+ * @formula `50 (male) or 45.5 (female) + 2.3 ÷ 2.54 × (heightCm − 152.4)`, the inch form of the published
+ *   bedside chart; the often printed 0.91 per cm is up to 0.2 kg higher in tall adults.
+ * @valid for adults; fitted from 152 cm up, and the chart extends it to 140 cm.
+ *
+ * @param input.sex sex, as used for lung size: 'male' or 'female'.
  * @param input.heightCm height, cm (100 to 250); from 105 for women, where the weight stays above zero.
  * @returns kg, always above zero.
  * @throws RangeError on missing, non-finite or impossible input.

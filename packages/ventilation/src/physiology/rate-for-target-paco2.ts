@@ -1,8 +1,11 @@
 import { requireNumbers } from '../units/require-number.ts';
 
 /**
- * The rate that would bring arterial CO2 to a target: `ratePerMin × paco2MmHg ÷ targetPaco2MmHg`.
- * Valid while tidal volume, dead-space fraction and CO2 production stay as they are; ask for a new gas.
+ * The rate that would bring arterial CO2 to a target.
+ *
+ * @title Rate for a target PaCO2
+ * @formula `ratePerMin × paco2MmHg ÷ targetPaco2MmHg`.
+ * @valid while tidal volume, dead-space fraction and CO2 production stay as they are; ask for a new gas.
  *
  * @param input.ratePerMin present total rate, /min (0 to 200).
  * @param input.paco2MmHg present arterial CO2 pressure, mmHg (5 to 250).

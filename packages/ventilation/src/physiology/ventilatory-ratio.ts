@@ -5,13 +5,16 @@ const PREDICTED_ML_PER_KG_MIN = 100;
 const IDEAL_PACO2_MMHG = 37.5;
 
 /**
- * Ventilation needed for this arterial CO2 against what healthy lungs of this size would need; about 1 is normal,
- * higher means more wasted ventilation: `VE (mL/min) × PaCO2 ÷ (PBW × 100 × 37.5)`.
- * Valid in a steady state, with exhaled minute volume and no large leak.
+ * Ventilation needed for this arterial CO2 against what healthy lungs of this size would need; about 1 is
+ * normal, higher means more wasted ventilation.
+ *
+ * @title Ventilatory ratio
+ * @formula `VE (mL/min) × PaCO2 ÷ (PBW × 100 × 37.5)`.
+ * @valid in a steady state, with exhaled minute volume and no large leak.
  *
  * @param input.minuteVentilationLMin exhaled minute volume, L/min (0 to 300).
  * @param input.paco2MmHg arterial CO2 pressure, mmHg (5 to 250).
- * @param input.predictedBodyWeightKg predicted body weight, kg (1 to 150).
+ * @param input.predictedBodyWeightKg predicted body weight, kg (1 to 150), not the actual one.
  * @returns ratio without unit.
  * @throws RangeError on missing, non-finite or impossible input.
  *

@@ -1,11 +1,14 @@
 import { requireNumber, requireWholeNumber } from '../units/require-number.ts';
 
 /**
- * Chance that an arrival finds every bed or machine taken and is turned away:
- * `B(0) = 1; B(n) = A × B(n − 1) ÷ (n + A × B(n − 1))`.
- * Valid for random arrivals that do not wait; of the stays only their mean counts. Small units break the model.
+ * Chance that an arrival finds every bed or machine taken and is turned away.
  *
- * @param input.servers beds or machines, count (0 to 10000).
+ * @title Chance of being turned away (Erlang B)
+ * @formula `B(0) = 1; B(n) = A × B(n − 1) ÷ (n + A × B(n − 1))`.
+ * @valid for random arrivals that do not wait; of the stays only their mean counts. Small units break the
+ *   model.
+ *
+ * @param input.servers beds or machines, count (0 to 10000), whole.
  * @param input.offeredErlangs arrivals per day times mean stay in days, erlangs (0 to 10000).
  * @returns probability, 0–1.
  * @throws RangeError on missing, non-finite or impossible input.

@@ -2,10 +2,15 @@ import { requireNumber, requireWholeNumber } from '../units/require-number.ts';
 import { nextBlocking } from './erlang-b.ts';
 
 /**
- * The load that a number of beds or machines can take at a chance of being turned away (Erlang B turned round, by
- * halving an interval until it can be halved no more).
+ * The load that a number of beds or machines can take at a chance of being turned away.
  *
- * @param input.servers beds or machines, count (1 to 10000).
+ * @title Load for a chance of being turned away
+ * @formula the largest A with `B(servers, A) ≤ blocking` (Erlang B turned round, by halving an interval until
+ *   it can be halved no more).
+ * @valid for random arrivals that do not wait; of the stays only their mean counts. Small units break the
+ *   model.
+ *
+ * @param input.servers beds or machines, count (1 to 10000), whole.
  * @param input.blocking accepted chance of being turned away, probability (1e-12 to 0.999).
  * @returns erlangs.
  * @throws RangeError on missing, non-finite or impossible input.

@@ -2,12 +2,17 @@ import { requireNumber } from '../units/require-number.ts';
 import { requireList } from '../units/require-word.ts';
 
 /**
- * How many of several independent events with unequal chances come true: the whole distribution, by convolution.
- * With it, patients who may each be off the ventilator by an hour become a distribution of free machines.
+ * How many of several independent events with unequal chances come true: the whole distribution. With it,
+ * patients who may each be off the ventilator by an hour become a distribution of free machines.
  *
- * @param input.probabilities each event's chance, a list of probabilities from 0 to 1; may be empty.
- * @returns probabilities of exactly 0, 1, … n events.
+ * @title How many of several chances come true
+ * @formula `P(k) = P(k) × (1 − p) + P(k − 1) × p`, for one event after the other.
+ * @valid while no event makes another more likely.
+ *
+ * @param input.probabilities list of each event’s chance, probabilities from 0 to 1; may be empty.
+ * @returns list of the probabilities of exactly 0, 1, … n events.
  * @throws RangeError on missing, non-finite or impossible input, naming the place in the list.
+ * @example { "probabilities": [0.2, 0.5, 0.9] }
  *
  * @source definition; computed by convolution.
  */

@@ -40,12 +40,19 @@ const RATE_POINTS: readonly UpTo<number>[] = [
 ];
 
 /**
- * Who will fail a mask: heart rate, acidosis, consciousness, oxygenation and rate, summed. Above 5 after an hour of mask
- * ventilation is high risk. Bands are printed for whole numbers; a value between two bands counts with the next.
+ * Who will fail a mask: heart rate, acidosis, consciousness, oxygenation and rate, summed. Above 5 after an
+ * hour of mask ventilation is high risk.
+ *
+ * @title HACOR score
+ * @formula heart rate `≤ 120` 0, above 1; pH `≥ 7.35` 0, `7.30–7.34` 2, `7.25–7.29` 3, below 4; coma scale `15`
+ *   0, `13–14` 2, `11–12` 5, `≤ 10` 10; P/F `> 200` 0, `176–200` 2, `151–175` 3, `126–150` 4, `101–125` 5, `≤
+ *   100` 6; rate `≤ 30` 0, `31–35` 1, `36–40` 2, `41–45` 3, above 4.
+ * @valid for adults on mask ventilation. Bands are printed for whole numbers; a value between two bands counts
+ *   with the next.
  *
  * @param input.heartRatePerMin heart rate, /min (0 to 350).
  * @param input.ph arterial pH (6.5 to 8).
- * @param input.glasgowComaScale points of the coma scale (3 to 15).
+ * @param input.glasgowComaScale points of the coma scale (3 to 15), whole.
  * @param input.pfMmHg PaO2/FiO2, mmHg (1 to 4000).
  * @param input.ratePerMin breaths, /min (0 to 200).
  * @returns points, 0–25.

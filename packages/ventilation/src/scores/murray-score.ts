@@ -29,13 +29,19 @@ const COMPLIANCE_POINTS: readonly Below<number>[] = [
 ];
 
 /**
- * Lung injury score: the mean of up to four parts of 0–4 points each. Above 2.5 is severe.
+ * The mean of up to four parts of 0–4 points each. Above 2.5 is severe.
  *
- * @param input.quadrants quadrants with consolidation on the film, count (0 to 4).
- * @param input.pfMmHg PaO2/FiO2, mmHg (1 to 4000): ≥ 300, 225, 175, 100 score 0, 1, 2, 3; below that 4.
- * @param input.peepCmH2O PEEP, cmH2O (0 to 120): ≤ 5, 6–8, 9–11, 12–14, ≥ 15.
- * @param input.complianceMlCmH2O static compliance, mL/cmH2O (0.1 to 500): ≥ 80, 60, 40, 20 score 0, 1, 2, 3; below
- *   that 4. Left out of the mean when absent or `null`.
+ * @title Lung injury score (Murray)
+ * @formula quadrants 0–4; P/F `≥ 300` 0, `225` 1, `175` 2, `100` 3, below 4; PEEP `≤ 5` 0, `6–8` 1, `9–11` 2,
+ *   `12–14` 3, `≥ 15` 4; compliance `≥ 80` 0, `60` 1, `40` 2, `20` 3, below 4; the sum over the number of
+ *   parts.
+ * @valid where at least the film, P/F and PEEP are known.
+ *
+ * @param input.quadrants quadrants with consolidation on the film, count (0 to 4), whole.
+ * @param input.pfMmHg PaO2/FiO2, mmHg (1 to 4000).
+ * @param input.peepCmH2O PEEP, cmH2O (0 to 120).
+ * @param input.complianceMlCmH2O static compliance, mL/cmH2O (0.1 to 500); may be left out, or `null`, and is
+ *   then no part of the mean.
  * @returns points, 0–4.
  * @throws RangeError on missing, non-finite or impossible input.
  *

@@ -14,7 +14,11 @@ const POINTS: readonly Below<number>[] = [
 const MOST_UNSUPPORTED = 2;
 
 /**
- * Respiratory part of the SOFA score: P/F below 400, 300, and with support below 200 and 100.
+ * Respiratory part of the SOFA score.
+ *
+ * @title Respiratory SOFA
+ * @formula P/F `< 400` 1, `< 300` 2, and with support `< 200` 3, `< 100` 4.
+ * @valid for an arterial sample; 3 and 4 points only with ventilatory support.
  *
  * @param input.pfMmHg PaO2/FiO2, mmHg (1 to 4000).
  * @param input.supported whether the patient has ventilatory support.

@@ -2,7 +2,11 @@ import { requireNumbers } from '../units/require-number.ts';
 import { OXYGEN_IN_AIR } from './air.ts';
 
 /**
- * Oxygen fraction of air and oxygen run together: `(air × 0.21 + oxygen) ÷ (air + oxygen)`.
+ * Oxygen fraction of air and oxygen run together.
+ *
+ * @title Blended FiO2
+ * @formula `(air × 0.21 + oxygen) ÷ (air + oxygen)`.
+ * @valid for gases that mix wholly, with nothing drawn in from the room.
  *
  * @param input.airLMin air, L/min (0 to 1000).
  * @param input.oxygenLMin oxygen, L/min (0 to 1000).

@@ -5,9 +5,13 @@ import { requireWord } from '../units/require-word.ts';
 const GAS_LITRES = { litres: 860, pounds: 344 } as const;
 
 /**
- * Gas that a quantity of liquid oxygen becomes: `860 × litres` or `344 × pounds`.
+ * Gas that a quantity of liquid oxygen becomes.
  *
- * @param input.kind 'litres' of liquid or 'pounds'.
+ * @title Gas from liquid oxygen
+ * @formula `860 × litres` or `344 × pounds`.
+ * @valid at room temperature and sea level, without what boils off.
+ *
+ * @param input.kind measure of the liquid: 'litres' or 'pounds'.
  * @param input.amount how many of them (0 to 1000000).
  * @returns L of gas.
  * @throws RangeError on missing, non-finite or impossible input.

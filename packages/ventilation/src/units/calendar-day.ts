@@ -11,8 +11,13 @@ const DAY = /^(\d{4})-(\d{2})-(\d{2})$/;
  */
 export function dayNumber(key: string, value: unknown): number {
   const parts = typeof value === 'string' ? DAY.exec(value) : null;
-  const ms = parts ? Date.UTC(Number(parts[1]), Number(parts[2]) - 1, Number(parts[3])) : Number.NaN;
-  if (parts && dayFromNumber(ms / DAY_MS) === value) return ms / DAY_MS;
+  if (parts) {
+    const [year, month, date] = [Number(parts[1]), Number(parts[2]) - 1, Number(parts[3])];
+    const day = new Date(Date.UTC(year, month, date));
+    // A day that no calendar has rolls over into another. Compared by number: every tile asks each second.
+    const isReal = day.getUTCFullYear() === year && day.getUTCMonth() === month && day.getUTCDate() === date;
+    if (isReal) return day.getTime() / DAY_MS;
+  }
   throw new RangeError(`${key} must be a calendar day as YYYY-MM-DD, not ${shown(value)}`);
 }
 
