@@ -38,7 +38,7 @@ export async function up(db: Knex): Promise<void> {
     table.text('reason');
     table.text('body').notNullable();
     table.check(
-      "kind in ('details','place','check','gas','airway','airway-check','happening')",
+      "kind in ('details','place','check','gas','airway','airway-check','happening','acknowledgement','infection-sign')",
       [],
       'observations_kind_known',
     );

@@ -11,7 +11,7 @@ export async function openBed(page: Page, label: string): Promise<void> {
 
 export async function openPart(
   page: Page,
-  part: 'Now' | 'Check' | 'Airway' | 'Gas' | 'Happening' | 'Record',
+  part: 'Now' | 'Check' | 'Airway' | 'Gas' | 'Happening' | 'Readiness' | 'Aids' | 'Record',
 ): Promise<void> {
   await page.getByRole('navigation', { name: /^Bed / }).getByRole('link', { name: part }).tap();
 }

@@ -32,6 +32,7 @@ export function aCheck(
     observedAt,
     mode: 'ac-vc',
     limits: { highPressureCmH2O: 40 },
+    passive: true,
     ...over,
     settings: { vtSetMl: 380, rateSetPerMin: 18, peepCmH2O: 10, fio2Percent: 45, ...over.settings },
     readings: { vtExhaledMl: 375, rateTotalPerMin: 18, peakCmH2O: 28, plateauCmH2O: 24, ...over.readings },

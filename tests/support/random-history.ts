@@ -6,6 +6,7 @@ import {
   type NumberField,
   READING_FIELDS,
   SETTING_FIELDS,
+  SIGN_FIELDS,
 } from '@windrow/ventilation/entry/fields';
 import type { AgeLadder } from '@windrow/ventilation/policy/policy';
 import { SUPPORT_CATALOGUE, SUPPORT_IDS, type SupportEntry } from '@windrow/ventilation/support/catalogue';
@@ -93,7 +94,20 @@ const happening = fc
     kind,
     ...(kind.startsWith('extubated') ? { toSupport } : {}),
     ...(kind === 'trial-failed' ? { detail: 'tired' } : {}),
+    ...(kind === 'screened' ? { screen: { coughAdequate: true } } : {}),
   }));
+
+/** Stands in the record and never on the board. */
+const sign = fc.oneof(
+  numbersOf(SIGN_FIELDS, ['temperatureC'], ['temperatureC']).map((values) => ({
+    sign: 'temperature',
+    ...values,
+  })),
+  numbersOf(SIGN_FIELDS, ['whiteCellsPerMm3'], ['whiteCellsPerMm3']).map((values) => ({
+    sign: 'white-cells',
+    ...values,
+  })),
+);
 
 export type Recorded = { path: string; body: Record<string, unknown> };
 const recorded: fc.Arbitrary<Recorded> = fc.oneof(
@@ -102,6 +116,7 @@ const recorded: fc.Arbitrary<Recorded> = fc.oneof(
   { weight: 1, arbitrary: airway.map((body) => ({ path: 'airways', body })) },
   { weight: 2, arbitrary: airwayCheck.map((body) => ({ path: 'airway-checks', body })) },
   { weight: 2, arbitrary: happening.map((body) => ({ path: 'happenings', body })) },
+  { weight: 1, arbitrary: sign.map((body) => ({ path: 'infection-signs', body })) },
 );
 
 /** Minutes before now that something is said to have happened; sometimes a little ahead of the server. */

@@ -47,6 +47,12 @@ export const PROBES: Record<string, (ground: Ground) => Probe | Promise<Probe>> 
 
   'GET /api/units/:unitId/board': (ground) => under(ground, 'board'),
   'GET /api/stays/:stayId/record': (ground) => onStay(ground, 'record'),
+  'GET /api/stays/:stayId/surveillance': (ground) => onStay(ground, 'surveillance'),
+  'POST /api/stays/:stayId/infection-signs': (ground) => ({
+    ...onStay(ground, 'infection-signs'),
+    body: { observedAt: now(ground), sign: 'temperature', temperatureC: 38.4 },
+  }),
+  'GET /api/stays/:stayId/trials': (ground) => onStay(ground, 'trials'),
   'POST /api/stays': (ground) => ({
     path: '/api/stays',
     body: anAdmission(ground.place.takenBedId, now(ground)),
@@ -77,6 +83,10 @@ export const PROBES: Record<string, (ground: Ground) => Probe | Promise<Probe>> 
   'POST /api/stays/:stayId/happenings': (ground) => ({
     ...onStay(ground, 'happenings'),
     body: { observedAt: now(ground), kind: 'proned' },
+  }),
+  'POST /api/stays/:stayId/acknowledgements': (ground) => ({
+    ...onStay(ground, 'acknowledgements'),
+    body: { observedAt: now(ground), flagId: 'none', fingerprint: 'none', note: 'seen at the bed' },
   }),
   'POST /api/observations/:observationId/amendments': async (ground) => ({
     path: `/api/observations/${await ownObservation(ground)}/amendments`,

@@ -88,6 +88,17 @@ export const EXPECTED: Record<string, Expected> = {
     where: 'unit',
     except: { display: 'shows boards; a record names its patient' },
   },
+  'GET /api/stays/:stayId/surveillance': {
+    row: board,
+    where: 'unit',
+    except: { display: 'shows boards; a day table names its patient' },
+  },
+  'POST /api/stays/:stayId/infection-signs': record,
+  'GET /api/stays/:stayId/trials': {
+    row: board,
+    where: 'unit',
+    except: { display: 'shows the bed, and not its past' },
+  },
   'POST /api/stays': { row: place, where: 'unit' },
   'PATCH /api/stays/:stayId': { row: place, where: 'unit' },
   'POST /api/stays/:stayId/transfer': { row: place, where: 'unit' },
@@ -97,6 +108,7 @@ export const EXPECTED: Record<string, Expected> = {
   'POST /api/stays/:stayId/airways': record,
   'POST /api/stays/:stayId/airway-checks': record,
   'POST /api/stays/:stayId/happenings': record,
+  'POST /api/stays/:stayId/acknowledgements': record,
   'POST /api/observations/:observationId/amendments': { row: 'amend own; amend another’s', where: 'unit' },
 
   'GET /api/units/:unitId/colleagues': { row: 'see shifts', where: 'unit' },

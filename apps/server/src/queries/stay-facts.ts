@@ -1,5 +1,11 @@
-import { CHECKS_WINDOW_MINUTES, type Stamped, type StayFacts } from '@windrow/ventilation/board/facts';
 import {
+  CHECKS_WINDOW_MINUTES,
+  NOTHING_ACKNOWLEDGED,
+  type Stamped,
+  type StayFacts,
+} from '@windrow/ventilation/board/facts';
+import {
+  type Acknowledgement,
   type Airway,
   type AirwayCheck,
   type Check,
@@ -47,6 +53,7 @@ export async function stayFacts(db: Knex, stayId: string, known: Known = {}): Pr
     airwayChecks: await kind<AirwayCheck>('airway-check', AIRWAY_CHECKS),
     happenings: await latestHappenings(db, stayId, known),
     support: await supportNow(db, stayId, known),
+    ...(await acknowledged(db, stayId, known)),
   };
 }
 
@@ -91,6 +98,15 @@ async function newest<Body>(
   return rows.map((row) => stamped<Body>(row));
 }
 
+/** Every fact of a kind that holds, oldest first. Grows with the stay: for what is computed on request only. */
+export async function allFacts<Body>(
+  db: Knex,
+  { stayId, kind }: { stayId: string; kind: ObservationRow['kind'] },
+): Promise<Stamped<Body>[]> {
+  const rows: FactRow[] = await newestFirst(holding(db, stayId, {}).where('observations.kind', kind));
+  return rows.map((row) => stamped<Body>(row)).reverse();
+}
+
 /** The latest check, and those in the window before it that a gas may have to be held against. */
 async function recentChecks(db: Knex, stayId: string, known: Known): Promise<Stamped<Check>[]> {
   const [latest] = await newest<Check>(db, { stayId, kind: 'check', limit: 1, known });
@@ -116,6 +132,33 @@ async function latestHappenings(db: Knex, stayId: string, known: Known): Promise
     if (latest.size === Object.keys(HAPPENING_KINDS).length) break;
   }
   return [...latest.values()];
+}
+
+/** How far back the facts are read by which an acknowledgement is seen to have held: a month of checks. */
+const SINCE_ACKNOWLEDGED = 200;
+
+/** The newest acknowledgement of each flag; only where there is one, the facts that came in since. */
+async function acknowledged(
+  db: Knex,
+  stayId: string,
+  known: Known,
+): Promise<Pick<StayFacts, 'acknowledgements' | 'sinceAcknowledged'>> {
+  const kind = <Body>(name: ObservationRow['kind']) =>
+    newest<Body>(db, { stayId, kind: name, limit: SINCE_ACKNOWLEDGED, known });
+  const all = await kind<Acknowledgement>('acknowledgement');
+  if (all.length === 0) return NOTHING_ACKNOWLEDGED;
+  const latest = new Map<string, Stamped<Acknowledgement>>();
+  // The one that was recorded last counts, whenever it is said to have been made.
+  for (const one of all.toSorted((a, b) => a.recordedAt.localeCompare(b.recordedAt)))
+    latest.set(one.body.flagId, one);
+  return {
+    acknowledgements: [...latest.values()],
+    sinceAcknowledged: {
+      checks: await kind<Check>('check'),
+      gases: await kind<Gas>('gas'),
+      airwayChecks: await kind<AirwayCheck>('airway-check'),
+    },
+  };
 }
 
 async function supportNow(db: Knex, stayId: string, known: Known): Promise<StayFacts['support']> {

@@ -22,6 +22,12 @@ export async function amendObservation(
   { observation, amendment }: { observation: ObservationRow; amendment: Amendment },
 ) {
   const { kind } = observation;
+  if (kind === 'acknowledgement') {
+    throw conflict(
+      'An acknowledgement is not amended; it ends by itself when what the flag rests on changes.',
+      [{ path: 'id', message: 'is an acknowledgement, which is not amended' }],
+    );
+  }
   if (!isRecordedKind(kind)) {
     throw conflict('Identity and place are corrected on the stay itself, not by an amendment.', [
       { path: 'id', message: `a fact of kind ${kind} is not amended here` },

@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
-import { RECORDED_KINDS } from '@windrow/ventilation/contract/observations';
+import type { Flag } from '@windrow/ventilation/contract/board';
+import { Acknowledgement, RECORDED_KINDS } from '@windrow/ventilation/contract/observations';
 import { DEFAULT_POLICY } from '@windrow/ventilation/policy/policy';
 import type { Knex } from 'knex';
 import { demoHospital } from '../../../../db/demo/demo-hospital.ts';
@@ -11,9 +12,9 @@ import { anyPerson, insertPerson, replaceGrants } from '../queries/people.ts';
 import { insertPolicy } from '../queries/policies.ts';
 import { insertAssignment, insertShift } from '../queries/shifts.ts';
 import { comparable, insertStay } from '../queries/stays.ts';
-import { insertBed, insertUnit } from '../queries/units.ts';
+import { bedById, insertBed, insertUnit } from '../queries/units.ts';
 import { insertMove, insertVentilator } from '../queries/ventilators.ts';
-import { rebuildBed } from './rebuild-bed.ts';
+import { bedFromFacts, rebuildBed } from './rebuild-bed.ts';
 
 export const DEMO_PASSWORD = 'windrow-demo';
 
@@ -153,8 +154,26 @@ async function fillStay(filling: Filling, stay: DemoStay): Promise<void> {
     });
     await append(fact.kind, body, observedAt, ago(fact.recordedMinutesAgo), fact.by);
   }
+  if (stay.acknowledged) {
+    const { flagId, minutesAgo, note, by } = stay.acknowledged;
+    const { fingerprint, short, sentence } = await flagInBed(filling, { bedId, flagId });
+    const at = ago(minutesAgo);
+    const { observedAt: _at, ...body } = Acknowledgement.parse({ observedAt: at, flagId, fingerprint, note });
+    await append('acknowledgement', { ...body, short, sentence }, at, at, by);
+  }
   if (leftAt !== null)
     await append('place', { event: 'left', outcome: stay.outcome ?? 'ward' }, leftAt, leftAt, first);
+}
+
+async function flagInBed(
+  { trx, ago }: Filling,
+  { bedId, flagId }: { bedId: string; flagId: string },
+): Promise<Flag> {
+  const row = await bedById(trx, bedId);
+  const bed = row && (await bedFromFacts(trx, { row, revision: 0, now: ago(0) }));
+  const flag = bed?.stay?.flags.find(({ id }) => id === flagId);
+  if (!flag) throw new Error(`the demo hospital acknowledges ${flagId}, which is not raised`);
+  return flag;
 }
 
 function supportOf(body: object): string | null {

@@ -1,19 +1,19 @@
 import { bedForAudience } from '@windrow/ventilation/board/for-audience';
-import type { RecordedKind } from '@windrow/ventilation/contract/observations';
 import { conflict } from '../errors.ts';
+import type { ObservationRow } from '../queries/observations.ts';
 import type { StayRow } from '../queries/stays.ts';
 import { appendObservation } from './append-observation.ts';
 import { requireObservedTime } from './observed-time.ts';
 import type { Write } from './write.ts';
 
-/** A check, gas, airway, airway check or happening: appended, the bed's row rebuilt, the screens told. */
+/** A check, a gas or whatever else a person records on a stay: appended, the bed's row rebuilt, the screens told. */
 export async function recordObservation(
   write: Write,
   {
     stay,
     kind,
     entry,
-  }: { stay: StayRow; kind: RecordedKind; entry: { observedAt: string } & Record<string, unknown> },
+  }: { stay: StayRow; kind: ObservationRow['kind']; entry: { observedAt: string } & Record<string, unknown> },
 ) {
   const bedId = requirePresent(stay);
   requireObservedTime({ observedAt: entry.observedAt, now: write.now });

@@ -13,7 +13,13 @@ export const BEDSIDE = {
   happening: () => import('../features/bed/happening-tab.tsx').then(({ HappeningTab }) => HappeningTab),
   transfer: () => import('../features/bed/place/transfer-tab.tsx').then(({ TransferTab }) => TransferTab),
   end: () => import('../features/bed/place/end-tab.tsx').then(({ EndTab }) => EndTab),
+  readiness: () => import('../features/readiness/readiness-tab.tsx').then(({ ReadinessTab }) => ReadinessTab),
+  aids: () => import('../features/aids/aids-tab.tsx').then(({ AidsTab }) => AidsTab),
   record: () => import('../features/record/record-tab.tsx').then(({ RecordTab }) => RecordTab),
+  surveillance: () =>
+    import('../features/surveillance/surveillance-tab.tsx').then(({ SurveillanceTab }) => SurveillanceTab),
+  infectionSign: () =>
+    import('../features/bed/infection-sign-tab.tsx').then(({ InfectionSignTab }) => InfectionSignTab),
   amend: () => import('../features/bed/amend/amend-tab.tsx').then(({ AmendTab }) => AmendTab),
   details: () => import('../features/admission/correct-tab.tsx').then(({ CorrectTab }) => CorrectTab),
   admit: () => import('../features/admission/admit-page.tsx').then(({ AdmitPage }) => AdmitPage),

@@ -56,6 +56,9 @@ export function PersonMenu({ session, links }: { session: Session; links: readon
           </MenuItem>
         ))}
         <MenuLine />
+        <MenuLink>
+          <Link to="/notes">Method notes</Link>
+        </MenuLink>
         <MenuItem onSelect={signOut}>Sign out</MenuItem>
       </Menu>
       <Dialog

@@ -23,8 +23,12 @@ const bedTabs: RouteObject[] = [
   fetched('airway', BEDSIDE.airway),
   fetched('gas', BEDSIDE.gas),
   fetched('happening', BEDSIDE.happening),
+  fetched('readiness', BEDSIDE.readiness),
+  fetched('aids', BEDSIDE.aids),
   fetched('record', BEDSIDE.record),
   fetched('record/amend', BEDSIDE.amend),
+  fetched('surveillance', BEDSIDE.surveillance),
+  fetched('surveillance/enter', BEDSIDE.infectionSign),
   fetched('details', BEDSIDE.details),
   fetched('transfer', BEDSIDE.transfer),
   fetched('end', BEDSIDE.end),
@@ -38,10 +42,15 @@ const pages: RouteObject[] = [
   fetched('assignment/:unitId', () =>
     import('../features/assignment/assignment-page.tsx').then(({ AssignmentPage }) => AssignmentPage),
   ),
+  fetched('surveillance/:stayId', () =>
+    import('../features/surveillance/surveillance-page.tsx').then(({ SurveillancePage }) => SurveillancePage),
+  ),
   fetched('capacity', () =>
     import('../features/capacity/capacity-page.tsx').then(({ CapacityPage }) => CapacityPage),
   ),
   fetched('setup', () => import('../features/setup/setup-page.tsx').then(({ SetupPage }) => SetupPage)),
+  fetched('notes', () => import('../features/notes/notes-page.tsx').then(({ NotesPage }) => NotesPage)),
+  fetched('notes/:name', () => import('../features/notes/note-page.tsx').then(({ NotePage }) => NotePage)),
   { path: '*', element: <NotFound /> },
 ];
 

@@ -21,6 +21,8 @@ function aBed(mode: SupportId | null, checkMinutes: number | null = 60, isOpen =
     proneSinceAt: null,
     away: null,
     trial: null,
+    lastTrial: null,
+    screen: null,
     device: null,
     airway: null,
     gas: null,

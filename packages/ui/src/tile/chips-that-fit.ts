@@ -22,3 +22,8 @@ export function chipsThatFit(chips: readonly TileChip[], letters: number): Fitte
   }
   return { chips: chips.slice(0, count), more: chips.slice(count) };
 }
+
+/** What these take, with their "+2" where there is one. */
+export function lettersOf(chips: readonly TileChip[], hasMore: boolean): number {
+  return chips.reduce((sum, { short }) => sum + short.length + EDGES, hasMore ? MORE : 0);
+}

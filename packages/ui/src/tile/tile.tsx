@@ -19,7 +19,7 @@ export function Tile({ view: { label, name, content }, shape }: { view: TileView
       </article>
     );
   }
-  const { mode, chips, check, airway, gas } = content;
+  const { mode, chips, seen, check, airway, gas } = content;
   return (
     <article className="tile" data-shape={shape} aria-label={name}>
       <div className="tile-spine">
@@ -33,7 +33,7 @@ export function Tile({ view: { label, name, content }, shape }: { view: TileView
             {mode}
           </strong>
         )}
-        <ChipRow chips={chips} letters={lettersFor(shape, mode)} />
+        <ChipRow chips={chips} seen={seen} letters={lettersFor(shape, mode)} />
       </div>
       <Group group="check" view={check} />
       <div className={`tile-ladder ${check.state === 'withdrawn' ? rakeOf(check) : ''}`}>

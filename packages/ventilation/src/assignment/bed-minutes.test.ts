@@ -41,6 +41,8 @@ function bed(stay: Partial<BedStay> | null): Bed {
       proneSinceAt: null,
       away: null,
       trial: null,
+      lastTrial: null,
+      screen: null,
       check: null,
       device: null,
       airway: null,

@@ -3,11 +3,13 @@ import { bedFlags } from '../flags/bed-flags.ts';
 import { predictedBodyWeight } from '../physiology/predicted-body-weight.ts';
 import { ladderFor, type Policy } from '../policy/policy.ts';
 import { supportEntry } from '../support/catalogue.ts';
+import { acknowledgedFlags } from './acknowledged-flags.ts';
 import { airwayNow, deviceNow } from './airway-now.ts';
 import { deriveCheck } from './derive-check.ts';
 import { deriveGas } from './derive-gas.ts';
 import type { StayFacts } from './facts.ts';
 import { latestOf } from './latest-of.ts';
+import { lastTrialOf, screenNow, trialNow } from './readiness-row.ts';
 import { settingsChangedAfter } from './settings-changed-after.ts';
 
 /**
@@ -33,11 +35,22 @@ export function bedBoard({
 }
 
 function stayRow(facts: StayFacts, policy: Policy): BedStay {
+  const stay = withoutFlags(facts, policy);
+  const flagsOf = (one: Omit<BedStay, 'flags'>) => bedFlags({ stay: one, thresholds: policy.thresholds });
+  const flags = acknowledgedFlags({
+    flags: flagsOf(stay),
+    facts,
+    flagsOf: (earlier) => flagsOf(withoutFlags(earlier, policy)),
+  });
+  return { ...stay, flags };
+}
+
+function withoutFlags(facts: StayFacts, policy: Policy): Omit<BedStay, 'flags'> {
   const { patient, difficultAirway, precautions, careLimits, orders } = facts.details;
   const predictedBodyWeightKg = weightOf(patient);
   const check = checkRow(facts, predictedBodyWeightKg);
   const device = deviceNow(facts);
-  const stay: Omit<BedStay, 'flags'> = {
+  return {
     stayId: facts.stayId,
     version: facts.version,
     admittedAt: facts.admittedAt,
@@ -55,6 +68,9 @@ function stayRow(facts: StayFacts, policy: Policy): BedStay {
         }
       : null,
     ...courseOf(facts),
+    trial: trialNow(facts),
+    lastTrial: lastTrialOf(facts),
+    screen: screenNow(facts, policy.thresholds.screenHoldsHours),
     check,
     device,
     airway: airwayNow(facts, device),
@@ -63,7 +79,6 @@ function stayRow(facts: StayFacts, policy: Policy): BedStay {
     plateauLimitCmH2O: policy.thresholds.plateauHighCmH2O,
     withdrawn: { check: null, airway: null, gas: null },
   };
-  return { ...stay, flags: bedFlags({ stay, thresholds: policy.thresholds }) };
 }
 
 /** Null without sex or height, and where the formula gives no weight: then nothing is judged per kg. */
@@ -151,26 +166,15 @@ function minuteVolumeAt(
   return isOther ? null : (check.body.readings.minuteVolumeLMin ?? null);
 }
 
-/** An extubation ends a trial whatever was written of its outcome. */
-const ENDS_OR_STARTS_TRIAL = [
-  'trial-started',
-  'trial-passed',
-  'trial-failed',
-  'extubated-planned',
-  'extubated-unplanned',
-] as const;
-
-function courseOf({ happenings }: StayFacts): Pick<BedStay, 'proneSinceAt' | 'away' | 'trial'> {
+function courseOf({ happenings }: StayFacts): Pick<BedStay, 'proneSinceAt' | 'away'> {
   const position = latestOf(happenings, ['proned', 'supine']);
   const transport = latestOf(happenings, ['left-for-transport', 'back-from-transport']);
-  const trial = latestOf(happenings, ENDS_OR_STARTS_TRIAL);
   return {
     proneSinceAt: position?.body.kind === 'proned' ? position.observedAt : null,
     away:
       transport?.body.kind === 'left-for-transport'
         ? { sinceAt: transport.observedAt, to: transport.body.detail ?? null }
         : null,
-    trial: trial?.body.kind === 'trial-started' ? { startedAt: trial.observedAt } : null,
   };
 }
 

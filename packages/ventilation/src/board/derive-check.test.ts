@@ -9,7 +9,7 @@ const VOLUME: CheckToDerive = {
   mode: 'ac-vc',
   settings: { vtSetMl: 450, rateSetPerMin: 18, peepCmH2O: 8, fio2Percent: 45 },
   readings: { vtExhaledMl: 440, rateTotalPerMin: 20, peakCmH2O: 28, plateauCmH2O: 22 },
-  passive: null,
+  passive: true,
 };
 
 function derive(check: Partial<CheckToDerive>, predictedBodyWeightKg: number | null = 73) {
@@ -50,6 +50,8 @@ describe('deriveCheck', () => {
     expect(effort.drivingPressureCmH2O).toBeNull();
     expect(effort.staticComplianceMlCmH2O).toBeNull();
     expect(effort.mechanicalPowerJMin).toBeNull();
+    // Where nobody recorded whether there was an effort, nothing is worked out either.
+    expect(derive({ passive: null })).toEqual(effort);
     expect(reading({ intrinsicPeepCmH2O: 14 }).drivingPressureCmH2O).toBeNull();
   });
 

@@ -14,6 +14,7 @@ describe('deriveGas', () => {
     expect(deriveGas({ gas: { ...GAS, site }, predictedBodyWeightKg: 73, minuteVolumeLMin: 8.8 })).toEqual({
       pfMmHg: null,
       ventilatoryRatio: null,
+      minuteVolumeAtDrawLMin: null,
     });
   });
 

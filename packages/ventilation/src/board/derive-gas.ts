@@ -5,6 +5,15 @@ import { ventilatoryRatio } from '../physiology/ventilatory-ratio.ts';
 /** As much of a gas as can be reckoned with. */
 export type GasToDerive = { site: string; pco2MmHg: number; po2MmHg: number; fio2Percent?: number };
 
+export type GasDerived = Pick<BedGas, 'pfMmHg' | 'ventilatoryRatio' | 'minuteVolumeAtDrawLMin'>;
+
+/** Of a gas from which nothing can be had. */
+export const NOTHING_DERIVED: GasDerived = {
+  pfMmHg: null,
+  ventilatoryRatio: null,
+  minuteVolumeAtDrawLMin: null,
+};
+
 /**
  * What one gas implies. Only an arterial gas says how well oxygen crosses and carbon dioxide leaves: any
  * other site gives null, and so does an oxygen fraction that nobody recorded at the draw.
@@ -20,8 +29,8 @@ export function deriveGas({
   gas: GasToDerive;
   predictedBodyWeightKg: number | null;
   minuteVolumeLMin: number | null;
-}): Pick<BedGas, 'pfMmHg' | 'ventilatoryRatio'> {
-  if (site !== 'arterial') return { pfMmHg: null, ventilatoryRatio: null };
+}): GasDerived {
+  if (site !== 'arterial') return NOTHING_DERIVED;
   return {
     pfMmHg: fio2Percent === undefined ? null : pfRatio({ pao2MmHg: po2MmHg, fio2: fio2Percent / 100 }),
     ventilatoryRatio:
@@ -32,5 +41,6 @@ export function deriveGas({
             paco2MmHg: pco2MmHg,
             predictedBodyWeightKg,
           }),
+    minuteVolumeAtDrawLMin: minuteVolumeLMin,
   };
 }

@@ -1,4 +1,11 @@
-import type { Airway, AirwayCheck, Check, Gas, Happening } from '../contract/observations.ts';
+import type {
+  Acknowledgement,
+  Airway,
+  AirwayCheck,
+  Check,
+  Gas,
+  Happening,
+} from '../contract/observations.ts';
 import type { StayDetails } from '../contract/stays.ts';
 import type { SupportId } from '../support/catalogue.ts';
 
@@ -31,6 +38,23 @@ export type StayFacts = {
   happenings: Stamped<Happening>[];
   /** Since when the latest support has been so, without a break. */
   support: { id: SupportId; sinceAt: string; observedAt: string } | null;
+  /** The latest acknowledgement of each flag. */
+  acknowledgements: Stamped<Acknowledgement>[];
+  /**
+   * By which it is seen whether an acknowledgement has held since: the newest facts of each group, back past it
+   * where they reach so far. Empty where nothing was acknowledged.
+   */
+  sinceAcknowledged: {
+    checks: Stamped<Check>[];
+    gases: Stamped<Gas>[];
+    airwayChecks: Stamped<AirwayCheck>[];
+  };
+};
+
+/** A stay in which nobody has acknowledged anything. */
+export const NOTHING_ACKNOWLEDGED: Pick<StayFacts, 'acknowledgements' | 'sinceAcknowledged'> = {
+  acknowledgements: [],
+  sinceAcknowledged: { checks: [], gases: [], airwayChecks: [] },
 };
 
 /** How far back checks are held against a gas: no unit keeps a gas on its board for longer. */

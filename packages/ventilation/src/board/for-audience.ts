@@ -1,4 +1,4 @@
-import type { Bed } from '../contract/board.ts';
+import type { Bed, Flag } from '../contract/board.ts';
 import type { Audience } from '../contract/live.ts';
 import { shownBed } from './shown-bed.ts';
 
@@ -7,10 +7,11 @@ import { shownBed } from './shown-bed.ts';
  * that says who the patient is, or what others wrote about them.
  */
 export function bedForAudience({ bed, audience, now }: { bed: Bed; audience: Audience; now: string }): Bed {
-  const { bed: shown } = shownBed({ bed, now });
+  const { bed: shown } = shownBed({ bed, now, keepsComing: true });
   if (audience === 'staff') return shown;
   const assignments = shown.assignments.map((one) => ({ ...one, displayName: one.initials }));
   if (!shown.stay) return { ...shown, assignments };
+  const { away, flags } = shown.stay;
   return {
     ...shown,
     assignments,
@@ -19,7 +20,12 @@ export function bedForAudience({ bed, audience, now }: { bed: Bed; audience: Aud
       patient: null,
       precautions: null,
       careLimits: null,
-      away: shown.stay.away && { ...shown.stay.away, to: null },
+      away: away && { ...away, to: null },
+      flags: flags.map(withoutNote),
     },
   };
+}
+
+function withoutNote(flag: Flag): Flag {
+  return flag.acknowledged ? { ...flag, acknowledged: { ...flag.acknowledged, note: null } } : flag;
 }

@@ -1,4 +1,4 @@
-import type { Bed, BedAssignment, BedStay, FactGroup } from '../contract/board.ts';
+import type { Bed, BedAssignment, BedStay, FactGroup, Flag } from '../contract/board.ts';
 import { type Freshness, freshness } from '../freshness/freshness.ts';
 
 /** How one group of facts stands now: its rung of the age ladder and its age. */
@@ -19,8 +19,17 @@ const GROUPS = ['check', 'airway', 'gas'] as const satisfies readonly FactGroup[
  * and takes out what is withdrawn, with the flags that rested on it.
  *
  * @param now server time, ISO or epoch milliseconds.
+ * @param keepsComing leaves flags in that hold from a later instant only: for who sends a row on to be aged there.
  */
-export function shownBed({ bed, now }: { bed: Bed; now: string | number }): ShownBed {
+export function shownBed({
+  bed,
+  now,
+  keepsComing = false,
+}: {
+  bed: Bed;
+  now: string | number;
+  keepsComing?: boolean;
+}): ShownBed {
   const at = typeof now === 'number' ? now : Date.parse(now);
   const assignment = runningAssignment(bed.assignments, at);
   const { stay } = bed;
@@ -34,7 +43,8 @@ export function shownBed({ bed, now }: { bed: Bed; now: string | number }): Show
     gas: aged(stay, 'gas', at),
   };
   const gone = GROUPS.filter((group) => groups[group].state === 'withdrawn');
-  return { bed: gone.length > 0 ? { ...bed, stay: without(stay, gone) } : bed, groups, assignment };
+  const kept = timely({ stay: gone.length > 0 ? without(stay, gone) : stay, at, keepsComing });
+  return { bed: kept === stay ? bed : { ...bed, stay: kept }, groups, assignment };
 }
 
 function aged(stay: BedStay, group: FactGroup, at: number): ShownGroup {
@@ -56,6 +66,31 @@ function without(stay: BedStay, gone: readonly FactGroup[]): BedStay {
   }
   kept.flags = stay.flags.filter((flag) => !flag.from.some((group) => gone.includes(group)));
   return kept;
+}
+
+/** Takes out what holds by the clock alone and does not now: a screen whose day is over, a flag before or after its time. */
+function timely({ stay, at, keepsComing }: { stay: BedStay; at: number; keepsComing: boolean }): BedStay {
+  const isOver = stay.screen !== null && Date.parse(stay.screen.holdsUntil) <= at;
+  const flags = stay.flags.every((flag) => holdsAt({ flag, at, keepsComing }))
+    ? stay.flags
+    : stay.flags.filter((flag) => holdsAt({ flag, at, keepsComing }));
+  if (!isOver && flags === stay.flags) return stay;
+  return { ...stay, flags, screen: isOver ? null : stay.screen };
+}
+
+/** Whether a flag holds at an instant, epoch milliseconds. */
+export function holdsAt({
+  flag: { holds },
+  at,
+  keepsComing = false,
+}: {
+  flag: Pick<Flag, 'holds'>;
+  at: number;
+  keepsComing?: boolean;
+}): boolean {
+  if (!holds) return true;
+  const hasCome = keepsComing || holds.from === null || Date.parse(holds.from) <= at;
+  return hasCome && (holds.until === null || at < Date.parse(holds.until));
 }
 
 /** The published assignment whose shift runs at this moment. */

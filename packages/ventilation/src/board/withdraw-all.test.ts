@@ -14,6 +14,7 @@ it('takes everything away but the times, and leaves what never was', () => {
     values: { ph: 7.2 },
     pfMmHg: null,
     ventilatoryRatio: null,
+    minuteVolumeAtDrawLMin: null,
   };
   const stay = {
     stayId: 's',
@@ -29,6 +30,8 @@ it('takes everything away but the times, and leaves what never was', () => {
     proneSinceAt: null,
     away: null,
     trial: null,
+    lastTrial: null,
+    screen: null,
     check: null,
     device: null,
     airway: null,
@@ -44,6 +47,8 @@ it('takes everything away but the times, and leaves what never was', () => {
         source: '',
         from: ['gas' as const],
         inputs: [],
+        fingerprint: 'f',
+        acknowledged: null,
       },
     ],
     withdrawn: { check: '2026-03-05T02:10:00.000Z', airway: null, gas: null },

@@ -15,6 +15,7 @@ export function withdrawAll({ bed, groups, assignment }: ShownBed): ShownBed {
     airway: null,
     gas: null,
     flags: [],
+    screen: null,
     withdrawn: { check: at('check'), airway: at('airway'), gas: at('gas') },
   };
   return { bed: { ...bed, stay }, groups: withdrawn, assignment };

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { AgeLadder } from '../policy/policy.ts';
 import { Id } from './instant.ts';
-import { MASK_INTERFACES, Support } from './observations.ts';
+import { MASK_INTERFACES, Support, TRIAL_METHOD_IDS } from './observations.ts';
 import { Patient, StayDetails } from './stays.ts';
 
 const numbers = z.record(z.string(), z.number());
@@ -28,6 +28,22 @@ export const Flag = z.object({
   inputs: z.array(
     z.object({ label: z.string(), value: z.number(), unit: z.string(), decimals: z.number().int() }),
   ),
+  /** For a flag that comes or goes by the clock alone: the instants between which it holds. */
+  holds: z.object({ from: z.string().nullable(), until: z.string().nullable() }).optional(),
+  /** What it rests on, as one word; see flags/flag-fingerprint.ts. */
+  fingerprint: z.string(),
+  /**
+   * Who looked at it and said so, while what it rests on is as it was then. It is quieted on the wall, never
+   * gone: as soon as one of its values differs, this is null again.
+   */
+  acknowledged: z
+    .object({
+      by: z.string(),
+      at: z.string(),
+      /** Null on a display: what people write is not for the wall. */
+      note: z.string().nullable(),
+    })
+    .nullable(),
 });
 export type Flag = z.infer<typeof Flag>;
 
@@ -92,6 +108,8 @@ export const BedGas = z.object({
   /** P/F, only of an arterial gas with FiO2 at the draw. */
   pfMmHg: z.number().nullable(),
   ventilatoryRatio: z.number().nullable(),
+  /** What the ventilatory ratio was reckoned with. */
+  minuteVolumeAtDrawLMin: z.number().nullable(),
 });
 export type BedGas = z.infer<typeof BedGas>;
 
@@ -110,7 +128,28 @@ export const BedStay = z.object({
   support: z.object({ id: Support, shortName: z.string(), sinceAt: z.string() }).nullable(),
   proneSinceAt: z.string().nullable(),
   away: z.object({ sinceAt: z.string(), to: z.string().nullable() }).nullable(),
-  trial: z.object({ startedAt: z.string() }).nullable(),
+  /** The breathing trial that runs now. */
+  trial: z
+    .object({
+      startedAt: z.string(),
+      method: z.enum(TRIAL_METHOD_IDS).nullable(),
+      plannedMinutes: z.number().nullable(),
+    })
+    .nullable(),
+  /** How the last breathing trial ended. */
+  lastTrial: z
+    .object({ startedAt: z.string().nullable(), endedAt: z.string(), outcome: z.enum(['passed', 'failed']) })
+    .nullable(),
+  /** The answers that only a person at the bed could give, and until when they stand. */
+  screen: z
+    .object({
+      observationId: Id,
+      observedAt: z.string(),
+      recordedByInitials: z.string(),
+      answers: z.record(z.string(), z.boolean()),
+      holdsUntil: z.string(),
+    })
+    .nullable(),
   check: BedCheck.nullable(),
   device: BedDevice.nullable(),
   /** The latest airway check of this device, or its placement where none was made since. */

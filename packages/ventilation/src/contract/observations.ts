@@ -1,8 +1,18 @@
 import { z } from 'zod';
-import { AIRWAY_FIELDS, GAS_FIELDS, LIMIT_FIELDS, READING_FIELDS, SETTING_FIELDS } from '../entry/fields.ts';
+import {
+  AIRWAY_FIELDS,
+  GAS_FIELDS,
+  LIMIT_FIELDS,
+  READING_FIELDS,
+  SETTING_FIELDS,
+  SIGN_FIELDS,
+  TRIAL_FIELDS,
+} from '../entry/fields.ts';
 import { numberSchema } from '../entry/number-schema.ts';
+import { SCREEN_ANSWER_KEYS, type ScreenAnswerKey } from '../readiness/screen-answers.ts';
+import { FAILURE_CRITERION_IDS } from '../readiness/trial-failure.ts';
 import { SUPPORT_IDS, type SupportId, supportEntry } from '../support/catalogue.ts';
-import { Id, Instant, Note, Reason } from './instant.ts';
+import { Day, Id, Instant, Note, Reason } from './instant.ts';
 
 type FieldTable = Record<string, Parameters<typeof numberSchema>[0]>;
 
@@ -195,6 +205,7 @@ export const HAPPENING_KINDS = {
   supine: { label: 'Turned supine', support: false },
   'left-for-transport': { label: 'Left for transport', support: false },
   'back-from-transport': { label: 'Back from transport', support: false },
+  screened: { label: 'Screened for readiness', support: false },
   'trial-started': { label: 'Breathing trial started', support: false },
   'trial-passed': { label: 'Breathing trial passed', support: false },
   'trial-failed': { label: 'Breathing trial failed', support: false },
@@ -204,43 +215,134 @@ export const HAPPENING_KINDS = {
 export type HappeningKind = keyof typeof HAPPENING_KINDS;
 const happeningKinds = Object.keys(HAPPENING_KINDS) as [HappeningKind, ...HappeningKind[]];
 
+export const TRIAL_METHODS = {
+  'pressure-support': 'Pressure support',
+  't-piece': 'T-piece',
+  cpap: 'CPAP',
+} as const;
+export type TrialMethod = keyof typeof TRIAL_METHODS;
+export const TRIAL_METHOD_IDS = Object.keys(TRIAL_METHODS) as [TrialMethod, ...TrialMethod[]];
+
+/** What a person found at the bed when screening; an item that was not judged is left out. */
+const ScreenAnswers = z
+  .strictObject(
+    Object.fromEntries(SCREEN_ANSWER_KEYS.map((key) => [key, z.boolean().optional()])) as Record<
+      ScreenAnswerKey,
+      z.ZodOptional<z.ZodBoolean>
+    >,
+  )
+  .refine((answers) => Object.values(answers).some((answer) => answer !== undefined), {
+    error: `a screen needs at least one answer of ${SCREEN_ANSWER_KEYS.join(', ')}`,
+  });
+
 export const Happening = z
   .strictObject({
     ...envelope,
     kind: z.enum(happeningKinds),
     /** For an extubation: what the patient breathes with from then on. */
     toSupport: Support.optional(),
-    /** For a transport: where to. For a failed trial: why. */
+    /** For a transport: where to. For a failed trial: why, in own words. */
     detail: Note.optional(),
+    /** For a trial that starts: on what, and for how long it is meant. */
+    method: z.enum(TRIAL_METHOD_IDS).optional(),
+    plannedMinutes: numberSchema(TRIAL_FIELDS.plannedMinutes).optional(),
+    /** For a trial that was passed: how long it went on. */
+    minutes: numberSchema(TRIAL_FIELDS.minutes).optional(),
+    /** For a failed trial: the published criteria that were met. */
+    criteria: z
+      .array(z.enum(FAILURE_CRITERION_IDS))
+      .min(1)
+      .max(FAILURE_CRITERION_IDS.length)
+      .refine((ids) => new Set(ids).size === ids.length, { error: 'names a criterion twice' })
+      .optional(),
+    /** For a screen: what the record cannot know. */
+    screen: ScreenAnswers.optional(),
   })
   .superRefine((happening, ctx) => {
-    const needsSupport = HAPPENING_KINDS[happening.kind].support;
+    const fault = (path: string, message: string, input: unknown = undefined) =>
+      ctx.addIssue({ code: 'custom', path: [path], input, message });
+    const { label, support: needsSupport } = HAPPENING_KINDS[happening.kind];
     if (needsSupport && !happening.toSupport) {
-      ctx.addIssue({
-        code: 'custom',
-        path: ['toSupport'],
-        input: undefined,
-        message: `an extubation needs the support that follows: ${SUPPORT_IDS.join(', ')}`,
-      });
+      fault('toSupport', `an extubation needs the support that follows: ${SUPPORT_IDS.join(', ')}`);
     }
     if (!needsSupport && happening.toSupport) {
-      ctx.addIssue({
-        code: 'custom',
-        path: ['toSupport'],
-        input: happening.toSupport,
-        message: `${HAPPENING_KINDS[happening.kind].label} does not change the support`,
-      });
+      fault('toSupport', `${label} does not change the support`, happening.toSupport);
     }
-    if (happening.kind === 'trial-failed' && !happening.detail) {
-      ctx.addIssue({
-        code: 'custom',
-        path: ['detail'],
-        input: undefined,
-        message: 'a failed trial needs its reason',
-      });
+    for (const [key, kind] of ONLY_OF) {
+      if (happening[key] !== undefined && happening.kind !== kind) {
+        fault(key, `belongs to "${HAPPENING_KINDS[kind].label}" only`, happening[key]);
+      }
+    }
+    if (happening.kind === 'trial-failed' && !happening.detail && !happening.criteria) {
+      fault('detail', 'a failed trial needs its reason: a published criterion, or a detail in words');
+    }
+    if (happening.kind === 'screened' && !happening.screen) {
+      fault('screen', `a screen needs at least one answer of ${SCREEN_ANSWER_KEYS.join(', ')}`);
     }
   });
+
+const ONLY_OF = [
+  ['method', 'trial-started'],
+  ['plannedMinutes', 'trial-started'],
+  ['minutes', 'trial-passed'],
+  ['criteria', 'trial-failed'],
+  ['screen', 'screened'],
+] as const satisfies readonly (readonly [string, HappeningKind])[];
 export type Happening = z.infer<typeof Happening>;
+
+/**
+ * Somebody has looked at a flag. It names what the flag rested on, so that it holds for these values and no
+ * others; it takes nothing away, and is not taken away itself.
+ */
+export const Acknowledgement = z.strictObject({
+  observedAt: Instant,
+  flagId: z.string().min(1).max(80),
+  fingerprint: z.string().min(1).max(600),
+  note: Note.min(3, { error: 'a note of at least 3 letters is needed' }),
+});
+export type Acknowledgement = z.infer<typeof Acknowledgement>;
+
+/** The farthest that a unit's calendar runs ahead of UTC; and how long ago a day may be, so that a slip in the year is caught. */
+const FARTHEST_ZONE_MS = 14 * 3_600_000;
+const FARTHEST_DAY_MS = 366 * 86_400_000;
+
+/** A sign of infection, or a day of treatment, entered by hand for surveillance. `day` is the unit's calendar day. */
+export const InfectionSign = z
+  .discriminatedUnion('sign', [
+    z.strictObject({
+      ...envelope,
+      sign: z.literal('temperature'),
+      temperatureC: numberSchema(SIGN_FIELDS.temperatureC),
+    }),
+    z.strictObject({
+      ...envelope,
+      sign: z.literal('white-cells'),
+      whiteCellsPerMm3: numberSchema(SIGN_FIELDS.whiteCellsPerMm3),
+    }),
+    /** One agent, given on one day. */
+    z.strictObject({
+      ...envelope,
+      sign: z.literal('antimicrobial'),
+      agent: z.string().trim().min(2, { error: 'the name of the agent is needed' }).max(60),
+      day: Day,
+    }),
+    /** A day wholly on extracorporeal support. */
+    z.strictObject({ ...envelope, sign: z.literal('extracorporeal'), day: Day }),
+  ])
+  .superRefine((entry, ctx) => {
+    if (!('day' in entry) || ctx.issues.length > 0) return;
+    const dayAt = (ms: number) => new Date(Date.parse(entry.observedAt) + ms).toISOString().slice(0, 10);
+    if (entry.day >= dayAt(-FARTHEST_DAY_MS) && entry.day <= dayAt(FARTHEST_ZONE_MS)) return;
+    ctx.addIssue({
+      code: 'custom',
+      path: ['day'],
+      input: entry.day,
+      message: `Day must be in the year before the time of the entry and not after it, not ${entry.day}`,
+    });
+  });
+export type InfectionSign = z.infer<typeof InfectionSign>;
+export const INFECTION_SIGNS = ['temperature', 'white-cells', 'antimicrobial', 'extracorporeal'] as const;
+export type InfectionSignKind = (typeof INFECTION_SIGNS)[number];
 
 /** Kinds of fact that a person records on a stay, by the last part of their route. */
 export const RECORDED_KINDS = {
@@ -249,6 +351,7 @@ export const RECORDED_KINDS = {
   airway: { path: 'airways', label: 'Airway', schema: Airway },
   'airway-check': { path: 'airway-checks', label: 'Airway check', schema: AirwayCheck },
   happening: { path: 'happenings', label: 'Happening', schema: Happening },
+  'infection-sign': { path: 'infection-signs', label: 'Infection sign', schema: InfectionSign },
 } as const;
 export type RecordedKind = keyof typeof RECORDED_KINDS;
 
@@ -264,7 +367,17 @@ export const SOURCES = ['hand', 'feed', 'import'] as const;
 /** One fact as it stands in the record. */
 export const RecordEntry = z.object({
   observationId: Id,
-  kind: z.enum(['check', 'gas', 'airway', 'airway-check', 'happening', 'details', 'place']),
+  kind: z.enum([
+    'check',
+    'gas',
+    'airway',
+    'airway-check',
+    'happening',
+    'infection-sign',
+    'acknowledgement',
+    'details',
+    'place',
+  ]),
   observedAt: z.string(),
   recordedAt: z.string(),
   recordedBy: z.object({ personId: Id, displayName: z.string(), initials: z.string() }),

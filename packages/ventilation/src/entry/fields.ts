@@ -485,6 +485,51 @@ export const PATIENT_FIELDS = {
   },
 } as const satisfies Record<string, NumberField>;
 
+/** Of a breathing trial, in whole minutes. @source length: Esteban A et al., Am J Respir Crit Care Med 1999;159:512–8. */
+export const TRIAL_FIELDS = {
+  plannedMinutes: {
+    label: 'Planned for',
+    short: 'planned',
+    unit: 'min',
+    decimals: 0,
+    step: 5,
+    hard: [5, 720],
+    soft: [30, 120],
+  },
+  minutes: {
+    label: 'Went on for',
+    short: 'minutes',
+    unit: 'min',
+    decimals: 0,
+    step: 1,
+    hard: [1, 1440],
+    soft: [30, 120],
+  },
+} as const satisfies Record<string, NumberField>;
+
+/** Signs of infection that are entered by hand, for surveillance. Limits are ours, for entry. */
+export const SIGN_FIELDS = {
+  temperatureC: {
+    label: 'Temperature',
+    short: 'temp',
+    unit: '°C',
+    decimals: 1,
+    step: 0.1,
+    hard: [25, 45],
+    soft: [34, 41],
+    keepsZeros: true,
+  },
+  whiteCellsPerMm3: {
+    label: 'White cells',
+    short: 'WBC',
+    unit: '/mm3',
+    decimals: 0,
+    step: 100,
+    hard: [0, 500_000],
+    soft: [500, 60_000],
+  },
+} as const satisfies Record<string, NumberField>;
+
 export type SettingKey = keyof typeof SETTING_FIELDS;
 export type ReadingKey = keyof typeof READING_FIELDS;
 export type LimitKey = keyof typeof LIMIT_FIELDS;

@@ -1,4 +1,4 @@
-import { suctionCatheterMaxFr } from '../airway/suction-catheter-max-fr.ts';
+import { CATHETERS_FR, suctionCatheter } from '../airway/suction-catheter.ts';
 import { AIRWAY_FIELDS } from '../entry/fields.ts';
 import { formatNumber, formatWithUnit } from '../format/number.ts';
 import { chip, type FlagRule, input, isAbove, limitInWords, told, toldWithUnit } from './rule.ts';
@@ -7,8 +7,6 @@ const CUFF = AIRWAY_FIELDS.cuffCmH2O;
 const DEPTH = AIRWAY_FIELDS.depthCm;
 const FRENCH = { unit: 'Fr', decimals: 0 } as const;
 
-/** Catheters as they are sold for adults and children. */
-const CATHETERS_FR = [5, 6, 8, 10, 12, 14] as const;
 /** What lies ready at an adult bed; a tube that takes no more than less is worth saying. */
 const USUAL_CATHETER_FR = 10;
 
@@ -59,18 +57,23 @@ export const AIRWAY_RULES: readonly FlagRule[] = [
     id: 'suction-catheter-small',
     from: ['airway'],
     source: 'AARC clinical practice guideline on endotracheal suctioning, Respir Care 2010;55:758–64',
-    find: ({ device, airway }) => {
+    find: ({ device, airway, thresholds }) => {
       if (!device || !airway) return null;
-      const atMost = suctionCatheterMaxFr({ tubeInternalDiameterMm: device.sizeMm });
-      if (atMost >= USUAL_CATHETER_FR) return null;
-      const size = CATHETERS_FR.findLast((fr) => fr <= atMost) ?? CATHETERS_FR[0];
+      const { suctionMaxPercent: atMostPercent } = thresholds;
+      const { atMostFr, catheterFr } = suctionCatheter({
+        tubeInternalDiameterMm: device.sizeMm,
+        atMostPercent,
+      });
+      const size = catheterFr ?? CATHETERS_FR[0];
+      if (size >= USUAL_CATHETER_FR) return null;
       return {
         level: 'note',
         short: chip(`Suction to ${size} Fr`),
-        sentence: `A tube of ${formatWithUnit(device.sizeMm, AIRWAY_FIELDS.sizeMm)} takes a suction catheter of at most ${size}\u00a0Fr, half of its inner diameter.`,
+        sentence: `A tube of ${formatWithUnit(device.sizeMm, AIRWAY_FIELDS.sizeMm)} takes a suction catheter of at most ${size}\u00a0Fr, ${atMostPercent}\u00a0% of its inner diameter by the unit's rule.`,
         inputs: [
           input('Tube', device.sizeMm, AIRWAY_FIELDS.sizeMm),
-          input('Catheter at most', atMost, { ...FRENCH, decimals: 1 }),
+          input('Share of the diameter', atMostPercent, { unit: '%', decimals: 0 }),
+          input('Catheter at most', atMostFr, { ...FRENCH, decimals: 1 }),
         ],
       };
     },

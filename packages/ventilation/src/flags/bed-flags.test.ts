@@ -41,6 +41,7 @@ describe('bedFlags', () => {
       ...check({
         settings: { ...VC, peepCmH2O: 14, fio2Percent: 70 },
         readings: { vtExhaledMl: 700, plateauCmH2O: 31, peakCmH2O: 36, rateTotalPerMin: 30 },
+        passive: true,
         limits: {},
       }),
       ...{ gas: gas({ ph: 7.2, po2MmHg: 62, fio2Percent: 70 }).gas },

@@ -32,6 +32,8 @@ export const EMPTY: Omit<BedStay, 'flags'> = {
   proneSinceAt: null,
   away: null,
   trial: null,
+  lastTrial: null,
+  screen: null,
   check: null,
   device: null,
   airway: null,
@@ -129,7 +131,8 @@ export function vt(vtExhaledMl: number, mode: SupportId = 'ac-vc') {
   return check({ mode, settings: mode === 'psv' ? PSV : VC, readings: { vtExhaledMl } });
 }
 export function pause(plateauCmH2O: number, more: CheckParts = {}) {
-  return check({ settings: { ...VC, peepCmH2O: 20 }, readings: { plateauCmH2O, vtExhaledMl: 400 }, ...more });
+  const settings = { ...VC, peepCmH2O: 20 };
+  return check({ settings, readings: { plateauCmH2O, vtExhaledMl: 400 }, passive: true, ...more });
 }
 /** Power is 0.098 × rate × volume × 25 cmH2O here. */
 export function power(ratePerMin: number) {
@@ -137,6 +140,7 @@ export function power(ratePerMin: number) {
     mode: 'ac-pc',
     settings: { pInspCmH2O: 15, peepCmH2O: 10, fio2Percent: 40, rateSetPerMin: 18 },
     readings: { vtExhaledMl: 400, rateTotalPerMin: ratePerMin },
+    passive: true,
   });
 }
 export function readings(values: BedCheck['readings'], more: CheckParts = {}) {
@@ -154,5 +158,6 @@ export function emptying(ratePerMin: number) {
   return check({
     settings: { ...VC, vtSetMl: 500, inspiratoryFlowLMin: 60, inspiratoryTimeS: 0.5 },
     readings: { vtExhaledMl: 500, plateauCmH2O: 15, peakCmH2O: 25, rateTotalPerMin: ratePerMin },
+    passive: true,
   });
 }

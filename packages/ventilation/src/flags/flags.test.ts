@@ -1,5 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { BedStay, Flag } from '../contract/board.ts';
+import type { LimitKey } from '../entry/fields.ts';
+import type { SupportId } from '../support/catalogue.ts';
 import { FLAG_RULES } from './bed-flags.ts';
 import {
   airway,
@@ -11,10 +13,13 @@ import {
   limited,
   pause,
   power,
+  QUIET_LIMITS,
   readings,
   VC,
   vt,
 } from './example-stays.ts';
+
+const VOLUMES: readonly string[] = ['lowVtMl', 'lowMinuteVolumeLMin'];
 
 const EDGES: {
   id: string;
@@ -34,6 +39,20 @@ const EDGES: {
     short: 'Plateau 31',
     flagged: pause(31, { passive: true }),
     quiet: pause(31, { passive: false }),
+  },
+  {
+    id: 'plateau-high',
+    level: 'attention',
+    short: 'Plateau 31',
+    flagged: pause(31, { passive: true }),
+    quiet: pause(31, { passive: null }),
+  },
+  {
+    id: 'driving-pressure-high',
+    level: 'attention',
+    short: 'Driving P 16',
+    flagged: pause(36),
+    quiet: pause(36, { passive: null }),
   },
   {
     id: 'driving-pressure-high',
@@ -249,10 +268,42 @@ const EDGES: {
     id: 'limits-not-recorded',
     level: 'note',
     short: 'Limit not noted',
-    flagged: check({ settings: VC, limits: { apnoeaS: 20 } }),
-    quiet: check({ settings: VC, limits: { highPressureCmH2O: 'off' } }),
+    flagged: check({ mode: 'ac-pc', limits: { lowVtMl: 200 } }),
+    quiet: check({ mode: 'ac-pc', limits: { lowVtMl: 200, lowMinuteVolumeLMin: 4 } }),
   },
+  {
+    id: 'limits-not-recorded',
+    level: 'note',
+    short: 'Limit not noted',
+    flagged: check({ mode: 'simv-vc', limits: { highPressureCmH2O: 40 } }),
+    quiet: check({ mode: 'ac-vc', limits: { highPressureCmH2O: 40 } }),
+  },
+  ...missing('limit-missing-high-pressure', 'P limit missing', 'highPressureCmH2O', [
+    'ac-vc',
+    'simv-vc',
+    'ac-vtpc',
+  ]),
+  ...missing('limit-missing-low-vt', 'Vt limit missing', 'lowVtMl', ['ac-pc', 'simv-pc', 'psv', 'ac-vtpc']),
+  ...missing('limit-missing-low-minute-volume', 'MV limit missing', 'lowMinuteVolumeLMin', [
+    'aprv',
+    'niv-st',
+  ]),
+  ...missing('limit-missing-apnoea', 'Apnoea missing', 'apnoeaS', ['psv', 'cpap']),
 ];
+
+/** All limits recorded but the one; and that one recorded too. */
+function missing(id: string, short: string, key: LimitKey, modes: readonly SupportId[]) {
+  const others = Object.fromEntries(
+    Object.entries(QUIET_LIMITS).filter(([other]) => other !== key && !VOLUMES.includes(other)),
+  );
+  return modes.map((mode) => ({
+    id,
+    level: 'attention' as const,
+    short,
+    flagged: check({ mode, limits: others }),
+    quiet: check({ mode, limits: { ...others, [key]: QUIET_LIMITS[key] ?? 'off' } }),
+  }));
+}
 
 it('names a limit within a sentence with only its first letter small', () => {
   const sentences = flagsOf(check({ mode: 'ac-pc', limits: {} })).map(({ sentence }) => sentence);
@@ -271,7 +322,16 @@ describe('each rule, at both sides of its edge', () => {
   it('has an edge for every rule that can find something', () => {
     const tried = new Set(EDGES.map(({ id }) => id));
     // High minute volume is required by no mode; an apnoea time has no reading to pass it.
-    const never = ['limit-off-high-minute-volume', 'limit-passed-apnoea'];
+    const never = [
+      'limit-off-high-minute-volume',
+      'limit-missing-high-minute-volume',
+      // A high rate limit that is not recorded is noted, not asked for.
+      'limit-missing-high-rate',
+      'limit-passed-apnoea',
+      // Their edges are in time, and stand beside the screen that they follow from.
+      'ready-to-try',
+      'trial-due',
+    ];
     expect(FLAG_RULES.map(({ id }) => id).filter((id) => !tried.has(id))).toEqual(never);
   });
 
@@ -279,6 +339,27 @@ describe('each rule, at both sides of its edge', () => {
     expect(ids(vt(700))).toContain('vt-per-kg-above');
     expect(ids(vt(700, 'psv'))).not.toContain('vt-per-kg-above');
     expect(ids(vt(860, 'psv'))).toContain('vt-per-kg-high');
+  });
+
+  it('asks once for a volume limit: the minute volume stands in where the mode wants no other', () => {
+    const high = { highPressureCmH2O: 40 };
+    expect(ids(check({ mode: 'ac-pc', limits: high }))).toEqual([
+      'limit-missing-low-vt',
+      'limits-not-recorded',
+    ]);
+    expect(ids(check({ mode: 'niv-st', limits: { ...high, lowVtMl: 200 } }))).toEqual([
+      'limits-not-recorded',
+    ]);
+  });
+
+  it('only notes limits where none at all was recorded', () => {
+    expect(ids(check({ mode: 'ac-pc', limits: {} }))).toEqual(['limits-not-recorded']);
+  });
+
+  it('gives with a limit that is off or missing the reading that goes unguarded', () => {
+    const stay = check({ mode: 'ac-pc', readings: { vtExhaledMl: 410 }, limits: { highPressureCmH2O: 40 } });
+    const found = flagsOf(stay).find(({ id }) => id === 'limit-missing-low-vt');
+    expect(found?.inputs.map(({ label, value }) => [label, value])).toEqual([['Exhaled Vt', 410]]);
   });
 
   it('says P/F once, at its higher level', () => {

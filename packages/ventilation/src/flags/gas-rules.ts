@@ -42,6 +42,7 @@ export const GAS_RULES: readonly FlagRule[] = [
         // A venous sample lies some hundredths lower, so the site belongs to the sentence.
         sentence: `pH is ${words} (${gas.site}), below ${limitInWords(limit, PH)}.`,
         inputs: [input('pH', value, PH), input('Limit', limit, PH)],
+        facts: [gas.site],
       };
     },
   },

@@ -38,10 +38,16 @@ const LIMITS: readonly AuditedLimit[] = [
   { key: 'apnoeaS', id: 'apnoea', chip: 'Apnoea', side: 'high', guards: [] },
 ];
 
-/** The limit audit: one row a limit and fault, so that two limits that are off are two flags. */
+/**
+ * The limit audit: is each limit that the mode needs recorded, does it stand, and does it still guard what is
+ * read. One row a limit and fault, so that two limits that are off are two flags.
+ */
 export const LIMIT_RULES: readonly FlagRule[] = [
   ...LIMITS.map((limit) =>
     rule({ id: `limit-off-${limit.id}`, find: (check) => limitOff({ check, limit }) }),
+  ),
+  ...LIMITS.map((limit) =>
+    rule({ id: `limit-missing-${limit.id}`, find: (check) => limitMissing({ check, limit }) }),
   ),
   ...LIMITS.map((limit) =>
     rule({ id: `limit-passed-${limit.id}`, find: (check) => limitPassed({ check, limit }) }),
@@ -60,8 +66,61 @@ function limitOff({ check, limit }: { check: BedCheck; limit: AuditedLimit }): F
     level: 'attention',
     short: limit.key === 'apnoeaS' ? 'Apnoea off' : chip(`${limit.chip} limit off`),
     sentence: `${label} is off; ${supportEntry(check.mode).shortName} must not run without it.`,
-    inputs: [],
+    ...restingOn(check, limit),
   };
+}
+
+/** Where other limits were written down, one that the mode must not run without is not forgotten but not set. */
+function limitMissing({ check, limit }: { check: BedCheck; limit: AuditedLimit }): Finding | null {
+  if (hasNoLimits(check) || check.limits[limit.key] !== undefined || !isDecisive(check, limit.key))
+    return null;
+  const { label } = LIMIT_FIELDS[limit.key];
+  return {
+    level: 'attention',
+    short: limit.key === 'apnoeaS' ? 'Apnoea missing' : chip(`${limit.chip} limit missing`),
+    sentence: `Other alarm limits are recorded and no ${inSentence(label)}; ${supportEntry(check.mode).shortName} must not run without it.`,
+    ...restingOn(check, limit),
+  };
+}
+
+/**
+ * Of the limits that a mode needs, those that watch what it does not fix: pressure where the volume is set,
+ * volume where the pressure is set, and that there is a breath where each is the patient's own. A tidal volume
+ * tells sooner than a minute volume, so where one of the two stands the other is only noted.
+ */
+function isDecisive({ mode, limits }: BedCheck, key: LimitKey): boolean {
+  const { requiredLimits } = supportEntry(mode);
+  if (!requiredLimits.includes(key) || key === 'highRatePerMin') return false;
+  return (
+    key !== 'lowMinuteVolumeLMin' ||
+    (!requiredLimits.includes('lowVtMl') && typeof limits.lowVtMl !== 'number')
+  );
+}
+
+/** A fault of a limit is of what goes unguarded by it: the reading itself, the mode, and all that it leaves open. */
+function restingOn(check: BedCheck, { guards }: AuditedLimit): Pick<Finding, 'inputs' | 'facts'> {
+  const guarded = guards.find((reading) => check.readings[reading] !== undefined);
+  const value = guarded && check.readings[guarded];
+  return {
+    inputs:
+      guarded === undefined || value === undefined
+        ? []
+        : [input(READING_FIELDS[guarded].label, value, READING_FIELDS[guarded])],
+    facts: leftOpen(check),
+  };
+}
+
+function leftOpen({ mode, readings }: BedCheck): string[] {
+  return [mode, ...supportEntry(mode).watched.map((key) => `${key}=${readings[key] ?? 'not read'}`)];
+}
+
+/** "Low exhaled Vt limit" within a sentence: only its first letter is small. */
+function inSentence(label: string): string {
+  return label.charAt(0).toLowerCase() + label.slice(1);
+}
+
+function hasNoLimits({ limits }: BedCheck): boolean {
+  return Object.keys(limits).length === 0;
 }
 
 /** Limits that guard what the mode does not fix; and where each breath is the patient's own, that there is one. */
@@ -87,19 +146,17 @@ function limitPassed({ check, limit }: { check: BedCheck; limit: AuditedLimit })
 
 function limitsNotRecorded(check: BedCheck): Finding | null {
   const { requiredLimits, shortName } = supportEntry(check.mode);
-  const missing = requiredLimits.filter((key) => check.limits[key] === undefined);
+  const none = hasNoLimits(check);
+  const missing = requiredLimits.filter(
+    (key) => check.limits[key] === undefined && (none || !isDecisive(check, key)),
+  );
   if (missing.length === 0) return null;
-  const none = Object.keys(check.limits).length === 0;
   const names = missing.map((key) => inSentence(LIMIT_FIELDS[key].label)).join(' and ');
   return {
     level: 'note',
     short: none ? 'No limits noted' : 'Limit not noted',
     sentence: `Alarm limits not recorded with this check: ${shortName} needs the ${names}.`,
     inputs: [],
+    facts: [...leftOpen(check), ...missing],
   };
-}
-
-/** A label within a sentence: only its first letter is small, so that Vt stays Vt. */
-function inSentence(label: string): string {
-  return label.charAt(0).toLowerCase() + label.slice(1);
 }

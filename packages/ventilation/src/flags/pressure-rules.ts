@@ -1,4 +1,4 @@
-import { wasPassive } from '../board/passive-breath.ts';
+import { madeEffort, wasPassive } from '../board/passive-breath.ts';
 import { READING_FIELDS, SETTING_FIELDS } from '../entry/fields.ts';
 import { chip, type FlagRule, input, isAbove, limitInWords, told, toldWithUnit } from './rule.ts';
 
@@ -63,7 +63,7 @@ export const PRESSURE_RULES: readonly FlagRule[] = [
     find: ({ check, thresholds }) => {
       const value = check?.readings.intrinsicPeepCmH2O;
       const limit = thresholds.intrinsicPeepHighCmH2O;
-      if (!check || value === undefined || !wasPassive(check) || value < limit) return null;
+      if (!check || value === undefined || madeEffort(check) || value < limit) return null;
       const field = READING_FIELDS.intrinsicPeepCmH2O;
       return {
         level: 'attention',

@@ -2,6 +2,7 @@ import type { BedCheck, BedStay, Flag } from '../contract/board.ts';
 import type { NumberField } from '../entry/fields.ts';
 import { formatNumber, formatWithUnit } from '../format/number.ts';
 import type { Policy } from '../policy/policy.ts';
+import type { ReadyToTry } from '../readiness/ready-to-try.ts';
 
 /** What every rule is asked about. `check` is null also where it no longer tells of the present support. */
 export type FlagFacts = {
@@ -10,10 +11,17 @@ export type FlagFacts = {
   airway: BedStay['airway'];
   gas: BedStay['gas'];
   thresholds: Policy['thresholds'];
+  /** Null unless a breathing trial may be tried. */
+  ready: ReadyToTry | null;
 };
 
 /** What a rule found: all of a flag but that which is the same each time. */
-export type Finding = Pick<Flag, 'level' | 'short' | 'sentence' | 'inputs'>;
+export type Finding = Pick<Flag, 'level' | 'short' | 'sentence' | 'inputs' | 'holds'> & {
+  /** Where it rests on other groups from case to case. */
+  from?: Flag['from'];
+  /** What it rests on beside its inputs and is no number, such as the mode; part of its fingerprint only. */
+  facts?: readonly string[];
+};
 
 /** One rule, as a row of a table. It finds nothing where a fact that it needs is missing. */
 export type FlagRule = Pick<Flag, 'id' | 'source' | 'from'> & {

@@ -59,8 +59,11 @@ export const TIMING_RULES: readonly FlagRule[] = [
   },
 ];
 
-/** Resistance can be told apart from compliance only in volume control with a constant flow that is known. */
-function emptyingOf({ mode, settings, readings, derived }: BedCheck) {
+/**
+ * How long the lungs take to empty and how long they have, with the numbers that made it. Resistance can be told
+ * apart from compliance only in volume control with a constant flow that is known.
+ */
+export function emptyingOf({ mode, settings, readings, derived }: BedCheck) {
   const { peakCmH2O, plateauCmH2O, rateTotalPerMin: ratePerMin } = readings;
   const { inspiratoryFlowLMin } = settings;
   const complianceMlCmH2O = derived.staticComplianceMlCmH2O;
@@ -72,11 +75,19 @@ function emptyingOf({ mode, settings, readings, derived }: BedCheck) {
   if (inspiratoryTimeS === null || inspiratoryTimeS < 0.05 || inspiratoryTimeS >= 60 / ratePerMin)
     return null;
 
-  const resistanceCmH2OPerLS = airwayResistance({ peakCmH2O, plateauCmH2O, inspiratoryFlowLMin });
+  const timing = { ratePerMin, inspiratoryTimeS };
+  const pressures = { peakCmH2O, plateauCmH2O, inspiratoryFlowLMin };
+  const resistanceCmH2OPerLS = airwayResistance(pressures);
   if (resistanceCmH2OPerLS > LARGEST_RESISTANCE) return null;
-  const timeConstantS = timeConstant({ complianceMlCmH2O, resistanceCmH2OPerLS });
-  const { expiratoryTimeS } = breathTiming({ ratePerMin, inspiratoryTimeS });
-  return { timeConstantS, expiratoryTimeS, neededS: TIME_CONSTANTS_TO_EMPTY * timeConstantS };
+  const lungs = { complianceMlCmH2O, resistanceCmH2OPerLS };
+  const timeConstantS = timeConstant(lungs);
+  const { expiratoryTimeS } = breathTiming(timing);
+  return {
+    timeConstantS,
+    expiratoryTimeS,
+    neededS: TIME_CONSTANTS_TO_EMPTY * timeConstantS,
+    madeFrom: { timing, pressures, lungs },
+  };
 }
 
 /** How long a constant flow takes to give the set volume. */

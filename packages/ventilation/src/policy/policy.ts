@@ -52,8 +52,24 @@ export const Policy = z.strictObject({
       cuffHighCmH2O: z.number().min(10).max(60),
       depthMovedCm: z.number().min(0.5).max(10),
       rateAboveSetPerMin: z.number().min(3).max(40),
+      /** How long the answers of a readiness screen stand. */
+      screenHoldsHours: z.number().min(4).max(48),
+      /** From a screen that is met until its breathing trial is due. */
+      trialDueHours: z.number().min(0.5).max(24),
+      /** A screen sooner than this after the last trial asks for no other. */
+      trialAgainHours: z.number().min(1).max(48),
+      /** How much of a tube's inner diameter a suction catheter may fill. */
+      suctionMaxPercent: z.number().min(30).max(70),
     })
     .superRefine((thresholds, ctx) => {
+      if (thresholds.trialDueHours >= thresholds.screenHoldsHours) {
+        ctx.addIssue({
+          code: 'custom',
+          path: ['trialDueHours'],
+          input: thresholds.trialDueHours,
+          message: `must be below screenHoldsHours, ${thresholds.screenHoldsHours}, not ${thresholds.trialDueHours}: a trial would never be due`,
+        });
+      }
       for (const [low, high] of THRESHOLD_PAIRS) {
         if (thresholds[low] <= thresholds[high]) continue;
         ctx.addIssue({
@@ -102,6 +118,10 @@ export const DEFAULT_POLICY: Policy = {
     cuffHighCmH2O: 30,
     depthMovedCm: 2,
     rateAboveSetPerMin: 10,
+    screenHoldsHours: 24,
+    trialDueHours: 4,
+    trialAgainHours: 12,
+    suctionMaxPercent: 50,
   },
   tasks: {
     check: { minutes: 12, everyMinutes: 240 },

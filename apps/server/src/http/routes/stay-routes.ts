@@ -1,6 +1,7 @@
 import { Bed } from '@windrow/ventilation/contract/board';
 import { Id } from '@windrow/ventilation/contract/instant';
 import {
+  Acknowledgement,
   Amendment,
   RECORDED_KINDS,
   RecordEntry,
@@ -11,6 +12,7 @@ import { may } from '@windrow/ventilation/permissions/permissions';
 import { z } from 'zod';
 import { notAllowed, staleVersion } from '../../errors.ts';
 import { stayVersionBy } from '../../queries/observations.ts';
+import { acknowledgeFlag } from '../../services/acknowledge-flag.ts';
 import { amendObservation } from '../../services/amend-observation.ts';
 import { admitStay, correctStay, dischargeStay, transferStay } from '../../services/place-stay.ts';
 import { readRecord } from '../../services/read-record.ts';
@@ -93,6 +95,21 @@ export const stayRoutes: Route[] = [
       }),
   }),
   ...recordRoutes(),
+  write({
+    method: 'post',
+    path: '/api/stays/:stayId/acknowledgements',
+    summary: 'Acknowledge a flag with a note, until what it rests on changes',
+    params: StayParams,
+    body: Acknowledgement,
+    response: Recorded,
+    status: 201,
+    needs: { act: 'record', in: inUnitOfStay },
+    handle: async ({ write, input }) =>
+      acknowledgeFlag(write, {
+        stay: await requireStay(write.trx, input.params.stayId),
+        entry: input.body,
+      }),
+  }),
   write({
     method: 'post',
     path: '/api/observations/:observationId/amendments',

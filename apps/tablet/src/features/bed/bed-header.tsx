@@ -2,7 +2,9 @@ import type { ShownBed } from '@windrow/ventilation/board/shown-bed';
 import type { BedStay } from '@windrow/ventilation/contract/board';
 import { formatDay, formatMoment } from '@windrow/ventilation/format/clock';
 import { dayIn } from '@windrow/ventilation/format/zoned-time';
-import { bodyInWords, nameInWords } from './patient-in-words.ts';
+import { weightWorkedOut } from '@windrow/ventilation/notes/gas-worked-out';
+import { bodyInWords, nameInWords, weightInWords } from './patient-in-words.ts';
+import { WorkedOutLink } from './worked-out-link.tsx';
 
 type BedHeaderProps = { shown: ShownBed; stay: BedStay; now: number; timeZone: string };
 
@@ -27,16 +29,29 @@ export function BedHeader({ shown, stay, now, timeZone }: BedHeaderProps) {
           )}
         </h1>
         <p className="text-ink-muted">
-          {patient &&
-            bodyInWords({
-              patient,
-              predictedBodyWeightKg: stay.predictedBodyWeightKg,
-              today: dayIn(now, timeZone),
-            })}
+          {patient && `${bodyInWords({ patient, today: dayIn(now, timeZone) })}, `}
+          {patient && <Weight patient={patient} predictedBodyWeightKg={stay.predictedBodyWeightKg} />}
         </p>
       </div>
       <BedMarks stay={stay} now={now} timeZone={timeZone} />
     </header>
+  );
+}
+
+function Weight({
+  patient,
+  predictedBodyWeightKg,
+}: { patient: NonNullable<BedStay['patient']> } & Pick<BedStay, 'predictedBodyWeightKg'>) {
+  const words = weightInWords(predictedBodyWeightKg);
+  const from = predictedBodyWeightKg === null ? null : weightWorkedOut(patient);
+  if (from === null) return words;
+  return (
+    // As high as a finger needs, without pushing the lines apart.
+    <span className="relative -my-3 inline-flex h-12 items-center">
+      <WorkedOutLink from={from} name={`${words}: how it is worked out`}>
+        {words}
+      </WorkedOutLink>
+    </span>
   );
 }
 

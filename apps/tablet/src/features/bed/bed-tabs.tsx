@@ -10,6 +10,9 @@ const TABS = [
   { to: 'airway', label: 'Airway', draft: 'airway', records: true },
   { to: 'gas', label: 'Gas', draft: 'gas', records: true },
   { to: 'happening', label: 'Happening', draft: 'happening', records: true },
+  { to: 'readiness', label: 'Readiness', draft: null, records: false },
+  { to: 'aids', label: 'Aids', draft: null, records: false },
+  { to: 'surveillance', label: 'Surveillance', draft: 'infection-sign', records: false },
   { to: 'record', label: 'Record', draft: null, records: false },
 ] as const;
 

@@ -1,5 +1,5 @@
 import { NOTHING_BEFORE } from './entry/entry-field.ts';
-import { happeningPlan } from './entry/plans/happening-plan.ts';
+import { happeningPlan, namesCriterion } from './entry/plans/happening-plan.ts';
 import { RecordingForm } from './recording-form.tsx';
 
 export function HappeningTab() {
@@ -7,5 +7,9 @@ export function HappeningTab() {
 }
 
 function planOf(values: Readonly<Record<string, string>>) {
-  return happeningPlan({ kind: values.kind ?? '', earlier: () => NOTHING_BEFORE });
+  return happeningPlan({
+    kind: values.kind ?? '',
+    earlier: () => NOTHING_BEFORE,
+    hasCriteria: namesCriterion(values),
+  });
 }

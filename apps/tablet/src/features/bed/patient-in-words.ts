@@ -12,14 +12,12 @@ export function nameInWords({ familyName, givenName }: { familyName: string; giv
   return `${familyName}, ${givenName}`;
 }
 
-/** "64 y, male, 178 cm, PBW 73.2 kg"; what is missing is said, since nothing is judged per kg without it. */
+/** "64 y, male, 178 cm"; what is missing is said, since nothing is judged per kg without it. */
 export function bodyInWords({
   patient,
-  predictedBodyWeightKg,
   today,
 }: {
   patient: NonNullable<BedStay['patient']>;
-  predictedBodyWeightKg: number | null;
   today: string;
 }): string {
   const { sex, heightCm, bornOn } = patient;
@@ -27,10 +25,13 @@ export function bodyInWords({
     `${ageInYears(bornOn, today)} y`,
     sex ?? 'sex not recorded',
     heightCm === null ? 'no height' : `${formatNumber(heightCm, { decimals: 0 })} cm`,
-    predictedBodyWeightKg === null
-      ? 'no PBW'
-      : `PBW ${formatNumber(predictedBodyWeightKg, { decimals: 1 })} kg`,
   ].join(', ');
+}
+
+export function weightInWords(predictedBodyWeightKg: number | null): string {
+  return predictedBodyWeightKg === null
+    ? 'no PBW'
+    : `PBW ${formatNumber(predictedBodyWeightKg, { decimals: 1 })} kg`;
 }
 
 /** Whole years between two calendar days. */

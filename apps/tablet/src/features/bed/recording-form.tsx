@@ -12,6 +12,7 @@ export function RecordingForm({
   planOf,
   initialValues = {},
   latestId,
+  backTo = 'now',
 }: {
   /** Tells the drafts of one stay apart. */
   name: string;
@@ -19,6 +20,8 @@ export function RecordingForm({
   planOf: (values: Readonly<Record<string, string>>) => EntryPlan;
   initialValues?: Readonly<Record<string, string>>;
   latestId: string | null;
+  /** The tab that is shown once it is recorded. */
+  backTo?: 'now' | 'surveillance';
 }) {
   const { shown, stay, timeZone, board } = useBed();
   const navigate = useNavigate();
@@ -36,7 +39,7 @@ export function RecordingForm({
       timeZone={timeZone}
       thresholds={thresholds}
       path={`/api/stays/${encodeURIComponent(stay.stayId)}/${RECORDED_KINDS[kind].path}`}
-      onDone={() => void navigate(`/beds/${board.unit.unitId}/${shown.bed.bedId}/now`)}
+      onDone={() => void navigate(`/beds/${board.unit.unitId}/${shown.bed.bedId}/${backTo}`)}
     />
   );
 }

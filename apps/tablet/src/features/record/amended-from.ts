@@ -11,5 +11,6 @@ export function mayBeAmended({
   amendedBy,
   amends,
 }: Pick<RecordEntry, 'kind' | 'amendedBy' | 'amends'>): boolean {
-  return kind !== 'details' && kind !== 'place' && amendedBy === null && amends?.as !== 'struck';
+  const isOfAForm = kind !== 'details' && kind !== 'place' && kind !== 'acknowledgement';
+  return isOfAForm && amendedBy === null && amends?.as !== 'struck';
 }

@@ -63,6 +63,27 @@ describe('entryInWords', () => {
       'Breathing trial failed',
       'Detail: tired',
     ]);
+    expect(text('happening', { kind: 'trial-failed', criteria: ['rate', 'arrhythmia'] })).toEqual([
+      'Breathing trial failed',
+      'Criteria met: Rate above 35 /min, or up by half; Arrhythmia',
+    ]);
+    expect(text('happening', { kind: 'trial-started', method: 't-piece', plannedMinutes: 30 })).toEqual([
+      'Breathing trial started',
+      'On: T-piece',
+      'Planned for 30\u00a0min',
+    ]);
+    expect(
+      text('happening', { kind: 'screened', screen: { coughAdequate: true, mentationAdequate: false } }),
+    ).toEqual(['Screened for readiness', 'Yes: Cough is adequate', 'No: Awake enough to protect the airway']);
+  });
+
+  it('says what was entered for surveillance', () => {
+    expect(text('infection-sign', { sign: 'temperature', temperatureC: 38 })).toEqual([
+      'Temperature 38.0\u00a0°C',
+    ]);
+    expect(text('infection-sign', { sign: 'antimicrobial', agent: 'meropenem', day: '2026-03-04' })).toEqual([
+      'Antimicrobial given, meropenem, 04-Mar-2026',
+    ]);
   });
 
   it('says who it is and where', () => {

@@ -11,9 +11,13 @@ import {
   PATIENT_FIELDS,
   READING_FIELDS,
   SETTING_FIELDS,
+  SIGN_FIELDS,
+  TRIAL_FIELDS,
 } from '@windrow/ventilation/entry/fields';
 import { formatDay } from '@windrow/ventilation/format/clock';
 import { formatWithUnit } from '@windrow/ventilation/format/number';
+import { SCREEN_ANSWERS } from '@windrow/ventilation/readiness/screen-answers';
+import { FAILURE_CRITERIA, type FailureCriterion } from '@windrow/ventilation/readiness/trial-failure';
 import { SUPPORT_CATALOGUE } from '@windrow/ventilation/support/catalogue';
 import { saidAs } from './words.ts';
 
@@ -29,6 +33,8 @@ export const KIND_WORDS: Readonly<Record<RecordEntry['kind'], string>> = {
   airway: 'Airway',
   'airway-check': 'Airway check',
   happening: 'Happening',
+  'infection-sign': 'For surveillance',
+  acknowledgement: 'Flag acknowledged',
   details: 'Details',
   place: 'Place',
 };
@@ -50,7 +56,7 @@ const LINES: Readonly<Record<RecordEntry['kind'], (body: Body) => EntryLine[]>> 
       label: null,
       text: joined([
         saidAs('interface', body.interface),
-        yesNo(body.passive, 'patient passive', 'patient made an effort'),
+        yesNo(body.passive, 'patient passive', 'patient made an effort') || passiveUnsaid(body),
       ]),
     },
   ],
@@ -87,13 +93,57 @@ const LINES: Readonly<Record<RecordEntry['kind'], (body: Body) => EntryLine[]>> 
   happening: (body) => [
     { label: null, text: isHappening(body.kind) ? HAPPENING_KINDS[body.kind].label : '' },
     { label: 'Breathes with from then on', text: supportInWords(body.toSupport) },
+    ...trialLines(body),
+    ...screenLines(body),
     { label: 'Detail', text: typeof body.detail === 'string' ? body.detail : '' },
   ],
+  'infection-sign': (body) => [
+    {
+      label: null,
+      text: joined([
+        saidAs('sign', body.sign),
+        numbersInWords(body, SIGN_FIELDS),
+        textOf(body.agent),
+        typeof body.day === 'string' ? formatDay(body.day) : '',
+      ]),
+    },
+  ],
+  acknowledgement: (body) => [{ label: textOf(body.short), text: textOf(body.sentence) }],
   details: detailLines,
   place: (body) => [
     { label: null, text: joined([saidAs('event', body.event), saidAs('outcome', body.outcome)]) },
   ],
 };
+
+/** What a breathing trial was made on, how long, and the published criteria by which it failed. */
+function trialLines(body: Body): EntryLine[] {
+  const criteria = Array.isArray(body.criteria) ? body.criteria.map(String) : [];
+  return [
+    { label: 'On', text: saidAs('method', body.method) },
+    { label: null, text: numbersInWords(body, TRIAL_FIELDS) },
+    {
+      label: 'Criteria met',
+      text: criteria.map((id) => (isCriterion(id) ? FAILURE_CRITERIA[id].label : id)).join('; '),
+    },
+  ];
+}
+
+function isCriterion(id: string): id is FailureCriterion {
+  return id in FAILURE_CRITERIA;
+}
+
+function screenLines({ screen }: Body): EntryLine[] {
+  const answers = groupOf(screen);
+  const given = (answer: boolean) =>
+    Object.entries(SCREEN_ANSWERS)
+      .filter(([key]) => answers[key] === answer)
+      .map(([, words]) => words)
+      .join('; ');
+  return [
+    { label: 'Yes', text: given(true) },
+    { label: 'No', text: given(false) },
+  ];
+}
 
 function detailLines(body: Body): EntryLine[] {
   const patient = groupOf(body.patient);
@@ -144,6 +194,7 @@ const ALL_FIELDS: Fields = {
   ...LIMIT_FIELDS,
   ...GAS_FIELDS,
   ...AIRWAY_FIELDS,
+  ...SIGN_FIELDS,
 };
 
 function unusualIn({ confirmedUnusual }: Body): EntryLine[] {
@@ -163,6 +214,11 @@ function supportInWords(id: unknown): string {
 
 function isHappening(kind: unknown): kind is HappeningKind {
   return typeof kind === 'string' && kind in HAPPENING_KINDS;
+}
+
+/** A plateau is used for nothing until somebody says that the patient was passive. */
+function passiveUnsaid({ readings }: Body): string {
+  return groupOf(readings).plateauCmH2O === undefined ? '' : 'passive? not recorded';
 }
 
 function yesNo(value: unknown, yes: string, no: string): string {

@@ -20,6 +20,14 @@ const WORDS: Readonly<Record<string, Readonly<Record<string, string>>>> = {
     nasal: 'nose mask',
     helmet: 'helmet',
   },
+  sign: {
+    antimicrobial: 'Antimicrobial given',
+    extracorporeal: 'Day on extracorporeal support',
+    // The number has its own name.
+    temperature: '',
+    'white-cells': '',
+  },
+  method: { 'pressure-support': 'pressure support', 't-piece': 'T-piece', cpap: 'CPAP' },
   event: { admitted: 'Admitted', transferred: 'Transferred to another bed', left: 'Stay ended' },
   outcome: { ward: 'to a ward', 'other-hospital': 'to another hospital', home: 'home', died: 'died' },
 };

@@ -3,6 +3,7 @@ import type { ShownBed } from '@windrow/ventilation/board/shown-bed';
 import { presentSupport } from '@windrow/ventilation/board/tile/present-support';
 import { tileCells } from '@windrow/ventilation/board/tile-cells';
 import type { BedStay } from '@windrow/ventilation/contract/board';
+import { formatAge } from '@windrow/ventilation/format/age';
 import { formatMoment } from '@windrow/ventilation/format/clock';
 import { Link } from 'react-router-dom';
 import { GroupAges } from './group-ages.tsx';
@@ -35,6 +36,7 @@ export function BedRow({ shown, stay, now, timeZone, isUnfinished }: BedRowProps
       <div className="col-span-2 flex min-w-0 flex-col gap-2 lg:col-span-1">
         <RowValues shown={shown} stay={stay} now={now} timeZone={timeZone} />
         <RowMarks shown={shown} stay={stay} now={now} isUnfinished={isUnfinished} />
+        <SeenFlags flags={stay.flags} now={now} timeZone={timeZone} />
       </div>
       <div className="col-span-2 lg:col-span-1">
         <GroupAges shown={shown} stay={stay} />
@@ -81,7 +83,10 @@ function RowMarks({
   isUnfinished,
 }: Pick<BedRowProps, 'shown' | 'stay' | 'now' | 'isUnfinished'>) {
   const due = whatIsDue({ shown, now });
-  const pressing = due.filter(({ minutes }, index) => index === 0 || minutes <= 0);
+  const openFlags = stay.flags.filter(({ acknowledged }) => acknowledged === null);
+  const pressing = due.filter(
+    ({ group, minutes }, index) => index === 0 || minutes <= 0 || group === 'trial',
+  );
   return (
     <ul className="flex flex-wrap items-center gap-x-3 gap-y-2">
       {pressing.map(({ group, words, minutes }) => (
@@ -99,10 +104,30 @@ function RowMarks({
       )}
       {stay.away && <li className="rounded-md border-2 border-ink px-2 font-bold">away</li>}
       {stay.proneSinceAt && <li className="rounded-md border-2 border-ink px-2 font-bold">prone</li>}
-      {stay.trial && <li className="rounded-md border-2 border-ink px-2 font-bold">breathing trial</li>}
-      {stay.flags.map(({ id, level, short }) => (
+      {stay.trial && (
+        <li className="rounded-md border-2 border-ink px-2 font-bold">
+          breathing trial {formatAge((now - Date.parse(stay.trial.startedAt)) / 60_000)}
+        </li>
+      )}
+      {openFlags.map(({ id, level, short }) => (
         <li key={id}>
           <FlagChip level={level}>{short}</FlagChip>
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+/** What somebody has acknowledged, quietly and with their note: it is not owed, and not forgotten. */
+function SeenFlags({ flags, now, timeZone }: { flags: BedStay['flags']; now: number; timeZone: string }) {
+  const seen = flags.filter(({ acknowledged }) => acknowledged !== null);
+  if (seen.length === 0) return null;
+  return (
+    <ul aria-label="Acknowledged flags" className="flex flex-col text-ink-muted text-sm">
+      {seen.map(({ id, short, acknowledged }) => (
+        <li key={id} className="wrap-break-word">
+          {short}: acknowledged by {acknowledged?.by}{' '}
+          {acknowledged && formatMoment(acknowledged.at, now, timeZone)}, {acknowledged?.note}
         </li>
       ))}
     </ul>

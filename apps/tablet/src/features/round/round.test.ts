@@ -24,6 +24,8 @@ function aStay({ checkAgo, ...rest }: { checkAgo: number | null } & Partial<BedS
     proneSinceAt: null,
     away: null,
     trial: null,
+    lastTrial: null,
+    screen: null,
     device: null,
     airway: null,
     gas: null,
@@ -132,6 +134,40 @@ describe('whatIsDue', () => {
     };
     const stay = aStay({ checkAgo: 10, device, orders: { checkEveryMinutes: null, gasEveryMinutes: 240 } });
     expect(due(stay)).toEqual(['no airway check yet', 'no gas yet', 'check due in 3h50']);
+  });
+});
+
+describe('a breathing trial', () => {
+  const flag = (id: string, holds: { from: string | null; until: string | null }) => ({
+    id,
+    level: 'note' as const,
+    short: '',
+    sentence: '',
+    source: '',
+    from: [],
+    inputs: [],
+    fingerprint: '',
+    acknowledged: null,
+    holds,
+  });
+  const young = { checkAgo: 10 };
+
+  it('is owed from the hour that the screen gave it', () => {
+    const ready = flag('ready-to-try', { from: null, until: ago(-65) });
+    expect(due(aStay({ ...young, flags: [ready] }))).toEqual([
+      'breathing trial due in 1h05',
+      'check due in 3h50',
+    ]);
+    const isDue = flag('trial-due', { from: ago(25), until: ago(-600) });
+    expect(due(aStay({ ...young, flags: [isDue] }))[0]).toBe('breathing trial due since 0h25');
+  });
+
+  it('that runs is to be ended after the time that was planned', () => {
+    const trial = (startedAgo: number, plannedMinutes: number | null) =>
+      due(aStay({ ...young, trial: { startedAt: ago(startedAgo), method: 't-piece', plannedMinutes } }));
+    expect(trial(12, 30)[0]).toBe('trial to end in 0h18');
+    expect(trial(34, 30)[0]).toBe('trial over by 0h04');
+    expect(trial(34, null)).toEqual(['check due in 3h50']);
   });
 });
 

@@ -1,9 +1,9 @@
 import type { ShownBed } from '@windrow/ventilation/board/shown-bed';
-import type { FactGroup } from '@windrow/ventilation/contract/board';
+import type { BedStay, FactGroup, Flag } from '@windrow/ventilation/contract/board';
 import { formatAge } from '@windrow/ventilation/format/age';
 
 export type Due = {
-  group: FactGroup;
+  group: FactGroup | 'trial';
   /** Minutes until it is overdue; below zero it has been for so long. */
   minutes: number;
   words: string;
@@ -21,10 +21,40 @@ export function whatIsDue({ shown, now }: { shown: ShownBed; now: number }): Due
   const owed: FactGroup[] = ['check'];
   if (stay.device) owed.push('airway');
   if (stay.orders.gasEveryMinutes !== null) owed.push('gas');
-  return owed
-    .map((group) => dueOf({ shown, group, sinceAt: stay.admittedAt, now }))
-    .sort((a, b) => a.minutes - b.minutes);
+  return [
+    ...owed.map((group) => dueOf({ shown, group, sinceAt: stay.admittedAt, now })),
+    ...trialDue({ stay, now }),
+  ].sort((a, b) => a.minutes - b.minutes);
 }
+
+/** A breathing trial: owed after a screen that was met, and to be ended after the time that was planned. */
+function trialDue({ stay: { trial, flags }, now }: { stay: BedStay; now: number }): Due[] {
+  const until = (instant: string) => (Date.parse(instant) - now) / 60_000;
+  if (trial) {
+    if (trial.plannedMinutes === null) return [];
+    const minutes = until(trial.startedAt) + trial.plannedMinutes;
+    const words =
+      minutes > 0
+        ? `trial to end in ${formatAge(Math.ceil(minutes))}`
+        : `trial over by ${formatAge(-minutes)}`;
+    return [{ group: 'trial', minutes, words }];
+  }
+  // Of the two flags only the one that holds now is in a row that may be shown.
+  const flag = flags.find(({ id, acknowledged }) => id in DUE_AT && acknowledged === null);
+  const dueAt = flag && DUE_AT[flag.id]?.(flag);
+  if (!dueAt) return [];
+  const minutes = until(dueAt);
+  const words =
+    minutes > 0
+      ? `breathing trial due in ${formatAge(Math.ceil(minutes))}`
+      : `breathing trial due since ${formatAge(-minutes)}`;
+  return [{ group: 'trial', minutes, words }];
+}
+
+const DUE_AT: Readonly<Record<string, (flag: Flag) => string | null | undefined>> = {
+  'ready-to-try': ({ holds }) => holds?.until,
+  'trial-due': ({ holds }) => holds?.from,
+};
 
 function dueOf({
   shown,

@@ -11,6 +11,7 @@ describe('pressureLadder', () => {
     const drawn = ladder('ac-vc', {
       settings: { peepCmH2O: 10 },
       readings: { peakCmH2O: 29, plateauCmH2O: 24 },
+      passive: true,
     });
     expect(drawn).toEqual({
       low: 10,
@@ -22,9 +23,17 @@ describe('pressureLadder', () => {
     });
   });
 
-  it('does not take a plateau of a breath with effort in it for measured', () => {
-    const readings = { plateauCmH2O: 24 };
-    expect(ladder('ac-vc', { settings: { peepCmH2O: 10 }, readings, passive: false })?.measured).toBe(false);
+  it.each([
+    [false, 'plateau 24, not passive'],
+    [null, 'plateau 24, passive? not recorded'],
+  ] as const)('draws no plateau where passive is %s, and only says what was entered', (passive, words) => {
+    const given = { readings: { plateauCmH2O: 24 }, passive };
+    const volume = ladder('ac-vc', { settings: { peepCmH2O: 10 }, ...given });
+    expect(volume).toMatchObject({ high: null, measured: false });
+    expect(volume?.words).toContain(words);
+    const pressure = ladder('ac-pc', { settings: { peepCmH2O: 10, pInspCmH2O: 16 }, ...given });
+    expect(pressure).toMatchObject({ high: 26, measured: false });
+    expect(pressure?.words).toContain(`set pressure 26, ${words}`);
   });
 
   it.each([

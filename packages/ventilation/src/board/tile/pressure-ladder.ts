@@ -1,12 +1,13 @@
 import type { BedCheck } from '../../contract/board.ts';
 import { supportEntry } from '../../support/catalogue.ts';
+import { notPassiveWords, wasPassive } from '../passive-breath.ts';
 
 /** What is drawn on the scale of 0 to 40 cmH2O beside the settings. */
 export type PressureLadder = {
   low: number;
-  /** Plateau where one was read; else the pressure that is set; null where neither is known. */
+  /** Plateau where one was read of a passive breath; else the pressure that is set; null where neither is known. */
   high: number | null;
-  /** Whether `high` is a plateau of a passive breath, so that the block's height is the driving pressure. */
+  /** Whether `high` is such a plateau, so that the block's height is the driving pressure. */
   measured: boolean;
   peak: number | null;
   /** The unit's plateau limit; null where no plateau can be meant (a mask). */
@@ -29,14 +30,16 @@ export function pressureLadder({
   const low = settings.peepCmH2O ?? settings.pLowCmH2O ?? settings.epapCmH2O ?? settings.cpapCmH2O;
   if ((kind !== 'invasive' && kind !== 'mask') || low === undefined) return null;
   const plateau = readings.plateauCmH2O ?? null;
+  const measured = plateau !== null && wasPassive(check);
   const drawn = {
     low,
-    high: plateau ?? setPressure(check, low),
-    measured: plateau !== null && check.passive !== false,
+    high: measured ? plateau : setPressure(check, low),
+    measured,
     peak: readings.peakCmH2O ?? null,
     limit: kind === 'invasive' ? plateauLimitCmH2O : null,
   };
-  return { ...drawn, words: inWords(drawn, plateau === null ? 'set pressure' : 'plateau') };
+  const asEntered = plateau === null || measured ? null : `plateau ${plateau}, ${notPassiveWords(check)}`;
+  return { ...drawn, words: inWords(drawn, asEntered) };
 }
 
 /** How high the mode itself pushes. A volume mode does not say. */
@@ -48,10 +51,14 @@ function setPressure({ mode, settings }: CheckToDraw, low: number): number | nul
   return mode === 'psv' && psCmH2O !== undefined ? low + psCmH2O : null;
 }
 
-function inWords({ low, high, peak, limit }: Omit<PressureLadder, 'words'>, highest: string): string {
+function inWords(
+  { low, high, measured, peak, limit }: Omit<PressureLadder, 'words'>,
+  asEntered: string | null,
+): string {
   const parts = [
     `lowest pressure ${low}`,
-    high === null ? null : `${highest} ${high}`,
+    high === null ? null : `${measured ? 'plateau' : 'set pressure'} ${high}`,
+    asEntered,
     peak === null ? null : `peak ${peak}`,
     limit === null ? null : `plateau limit ${limit}`,
   ];

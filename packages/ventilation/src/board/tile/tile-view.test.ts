@@ -39,6 +39,7 @@ const aGas = (minutes: number, given: Partial<BedGas> = {}): BedGas => ({
   values: { ph: 7.3, pco2MmHg: 44, po2MmHg: 78 },
   pfMmHg: 173.3,
   ventilatoryRatio: null,
+  minuteVolumeAtDrawLMin: null,
   ...given,
 });
 
@@ -63,6 +64,8 @@ const aStay = (given: Partial<BedStay> = {}): BedStay => ({
   proneSinceAt: null,
   away: null,
   trial: null,
+  lastTrial: null,
+  screen: null,
   check: aCheck(72),
   device: {
     observationId: 'o',
@@ -249,18 +252,33 @@ describe('people, marks and flags', () => {
     expect(ofStay().initials).toBeNull();
   });
 
+  const BY_AO = { by: 'AO', at: ago(5), note: 'known to the team' };
+  const flag = (id: string, level: 'note' | 'attention') => ({
+    id,
+    level,
+    short: id,
+    sentence: '',
+    source: '',
+    from: [],
+    inputs: [],
+    fingerprint: id,
+    acknowledged: null,
+  });
+
   it('puts attention before notes', () => {
-    const flag = (id: string, level: 'note' | 'attention') => ({
-      id,
-      level,
-      short: id,
-      sentence: '',
-      source: '',
-      from: [],
-      inputs: [],
-    });
     const { chips } = ofStay({ flags: [flag('a', 'note'), flag('b', 'attention'), flag('c', 'note')] });
     expect(chips.map(({ id }) => id)).toEqual(['b', 'a', 'c']);
+  });
+
+  it('counts what somebody has acknowledged, and shows it as no chip', () => {
+    const { chips, seen } = ofStay({
+      flags: [flag('a', 'attention'), { ...flag('b', 'attention'), acknowledged: BY_AO }, flag('c', 'note')],
+    });
+    expect(chips.map(({ id }) => id)).toEqual(['a', 'c']);
+    expect(seen).toBe(1);
+    expect(JSON.stringify(ofStay({ flags: [{ ...flag('b', 'note'), acknowledged: BY_AO }] }))).not.toContain(
+      'known to the team',
+    );
   });
 
   it('marks away, difficult airway and prone', () => {

@@ -6,6 +6,7 @@ import { type CheckView, checkView } from './check-view.ts';
 import { gasView } from './gas-view.ts';
 import type { GroupView, Reader } from './group-view.ts';
 import { presentSupport } from './present-support.ts';
+import { trialChip } from './trial-chip.ts';
 
 /** A word about the patient that must be seen before anything is done at the bed. */
 export type TileMark = { key: 'prone' | 'difficult-airway' | 'away'; lines: readonly string[] };
@@ -27,7 +28,10 @@ export type TileView = {
         cover: string | null;
         mode: string | null;
         marks: readonly TileMark[];
+        /** The flags that nobody has acknowledged. */
         chips: readonly TileChip[];
+        /** How many more somebody has, with the values that they rest on. */
+        seen: number;
         check: CheckView;
         airway: GroupView;
         gas: GroupView;
@@ -58,7 +62,7 @@ export function tileView({ bed, reader }: { bed: Bed; reader: Reader }): TileVie
       cover: shown.assignment?.coverInitials ?? null,
       mode,
       marks: marksOf(stay, reader),
-      chips: chipsOf(shown),
+      ...flagsOf(shown, reader),
       check,
       airway: airwayView({ shown, stay, reader }),
       gas: gasView({ shown, stay, reader }),
@@ -78,11 +82,16 @@ function marksOf({ proneSinceAt, difficultAirway, away }: BedStay, { timeZone }:
   return marks;
 }
 
-/** Attention before notes; within a level as the rules have them. */
-function chipsOf({ bed }: ShownBed): TileChip[] {
-  const chips = (bed.stay?.flags ?? []).map(({ id, short, level }) => ({ id, short, level }));
-  return [
+/** Attention before notes, of which a running trial is the first; else as the rules have them. What was acknowledged is only counted. */
+function flagsOf({ bed }: ShownBed, { now }: Reader): { chips: TileChip[]; seen: number } {
+  const flags = bed.stay?.flags ?? [];
+  const open = flags.filter(({ acknowledged }) => acknowledged === null);
+  const chips = open.map(({ id, short, level }) => ({ id, short, level }));
+  const trial = trialChip({ trial: bed.stay?.trial ?? null, now });
+  const inOrder = [
     ...chips.filter(({ level }) => level === 'attention'),
+    ...(trial ? [trial] : []),
     ...chips.filter(({ level }) => level === 'note'),
   ];
+  return { chips: inOrder, seen: flags.length - open.length };
 }

@@ -91,6 +91,10 @@ describe('amendPlan', () => {
     ['airway', { event: 'removed' }],
     ['airway-check', { cuffCmH2O: 26, secured: false }],
     ['happening', { kind: 'trial-failed', detail: 'tired' }],
+    ['happening', { kind: 'trial-failed', criteria: ['rate', 'effort'] }],
+    ['happening', { kind: 'trial-started', method: 't-piece', plannedMinutes: 30 }],
+    ['happening', { kind: 'trial-passed', minutes: 34 }],
+    ['happening', { kind: 'screened', screen: { coughAdequate: true, causeImproving: false } }],
   ] as const)('gives a %s back as it was when nothing is changed', (kind, body) => {
     const entry = anEntry(kind, body);
     const { plan, judged } = amended(entry, { reason: 'looked at again' });

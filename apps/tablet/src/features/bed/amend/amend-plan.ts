@@ -5,7 +5,8 @@ import { airwayCheckPlan } from '../entry/plans/airway-check-plan.ts';
 import { airwayPlan, removalPlan } from '../entry/plans/airway-plan.ts';
 import { checkPlan } from '../entry/plans/check-plan.ts';
 import { gasPlan } from '../entry/plans/gas-plan.ts';
-import { happeningPlan } from '../entry/plans/happening-plan.ts';
+import { happeningPlan, namesCriterion } from '../entry/plans/happening-plan.ts';
+import { infectionSignPlan } from '../entry/plans/infection-sign-plan.ts';
 import { REASON_SECTION } from '../entry/plans/stay-plans.ts';
 import type { Earlier } from '../entry/rows.ts';
 
@@ -46,7 +47,11 @@ function planOf({
     case 'airway-check':
       return airwayCheckPlan({ earlier, cuffed: true, mark: null });
     case 'happening':
-      return happeningPlan({ kind: values.kind ?? '', earlier });
+      return happeningPlan({ kind: values.kind ?? '', earlier, hasCriteria: namesCriterion(values) });
+    case 'infection-sign':
+      return infectionSignPlan({ sign: values.sign ?? '', earlier });
+    case 'acknowledgement':
+      throw new RangeError('an acknowledgement is not amended');
     case 'details':
     case 'place':
       throw new RangeError(`${entry.kind} is corrected on the bed's own pages`);
@@ -55,7 +60,7 @@ function planOf({
 
 /** Whether an entry of this kind can be amended from the record. */
 export function isAmendable({ kind }: Pick<RecordEntry, 'kind'>): boolean {
-  return kind !== 'details' && kind !== 'place';
+  return kind !== 'details' && kind !== 'place' && kind !== 'acknowledgement';
 }
 
 /** The recorded values as texts, so that the form opens with what stands in the record. */

@@ -21,10 +21,17 @@ export function earlierOfBody({ body, ageMinutes }: { body: Flat; ageMinutes: nu
   };
 }
 
-/** A body's values by row: the parts of a check lie in groups of their own. */
+/** A body's values by row: the parts of a check, a screen and a failed trial lie in groups of their own. */
 export function flattened(body: Flat): Flat {
-  const { settings, readings, limits, ...rest } = body;
-  return { ...rest, ...groupOf(settings), ...groupOf(readings), ...groupOf(limits) };
+  const { settings, readings, limits, screen, criteria, ...rest } = body;
+  return {
+    ...rest,
+    ...groupOf(settings),
+    ...groupOf(readings),
+    ...groupOf(limits),
+    ...groupOf(screen),
+    ...listOf(criteria),
+  };
 }
 
 const flatOf: Record<FactGroup, (stay: BedStay) => Flat> = {
@@ -45,6 +52,17 @@ function beforeIn({ group, value }: { group: ShownGroup; value: unknown }): Befo
 export function asRowValue(value: unknown): number | string | null {
   if (typeof value === 'number' || typeof value === 'string') return value;
   return typeof value === 'boolean' ? (value ? 'yes' : 'no') : null;
+}
+
+/** A list of words is a row of yes for each of them. */
+function listOf(value: unknown): Flat {
+  if (!Array.isArray(value)) return {};
+  return Object.fromEntries(value.map((word) => [criterionKey(String(word)), true]));
+}
+
+/** The row of a published criterion of a failed trial. */
+export function criterionKey(id: string): string {
+  return `criterion-${id}`;
 }
 
 function groupOf(value: unknown): Flat {

@@ -1,4 +1,5 @@
 import type { NumberField } from '@windrow/ventilation/entry/fields';
+import { formatDay } from '@windrow/ventilation/format/clock';
 import { formatNumber, formatWithUnit } from '@windrow/ventilation/format/number';
 
 /** A value of a field: a number, `off` for an alarm limit, or the word of a choice. */
@@ -37,7 +38,11 @@ export type ChoiceRow = Row & {
   options: readonly Option[] /** As a list to open, where the options are many. */;
   asList?: boolean;
 };
-export type TextRow = Row & { kind: 'text'; hint: string };
+export type TextRow = Row & {
+  kind: 'text';
+  hint: string /** A calendar day, by the device's own calendar. */;
+  isDay?: boolean;
+};
 export type EntryRow = NumberRow | ChoiceRow | TextRow;
 
 export type EntrySection = {
@@ -51,6 +56,7 @@ export type EntrySection = {
 export function valueInWords(row: EntryRow, value: EntryValue): string {
   if (row.kind === 'choice')
     return row.options.find((option) => option.value === value)?.label ?? String(value);
+  if (row.kind === 'text' && row.isDay) return formatDay(String(value));
   if (row.kind === 'text' || typeof value === 'string') return String(value);
   return formatWithUnit(value, row.field);
 }

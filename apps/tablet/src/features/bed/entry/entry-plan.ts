@@ -6,7 +6,16 @@ import type { EntrySection, EntryValues } from './entry-field.ts';
  * plan, and so are a transfer, the end of a stay and an amendment.
  */
 export type EntryPlan = {
-  kind: 'check' | 'gas' | 'airway' | 'airway-check' | 'happening' | 'transfer' | 'end' | 'struck';
+  kind:
+    | 'check'
+    | 'gas'
+    | 'airway'
+    | 'airway-check'
+    | 'happening'
+    | 'infection-sign'
+    | 'transfer'
+    | 'end'
+    | 'struck';
   title: string;
   /** "Observed", "Drawn", "Placed": what the time is the time of. Null: the answers hold for no time. */
   timeLabel: string | null;

@@ -314,6 +314,8 @@ describe('the other plans', () => {
         .map(({ key }) => key);
     expect(needed('extubated-planned')).toEqual(['kind', 'toSupport']);
     expect(needed('trial-failed')).toEqual(['kind', 'detail']);
+    expect(needed('trial-started')).toEqual(['kind', 'method', 'plannedMinutes']);
+    expect(needed('trial-passed')).toEqual(['kind', 'minutes']);
     expect(needed('proned')).toEqual(['kind']);
   });
 

@@ -1,22 +1,46 @@
 import { FlagChip } from '@windrow/ui/controls/flag-chip';
 import type { DerivedLine } from '../derived-in-words.ts';
+import { WorkedOutLink } from '../worked-out-link.tsx';
 import type { Findings } from './findings.ts';
 
 /** What the typed values mean, while they are typed. What cannot be had yet shows a dash and no guess. */
 export function DerivedLines({ lines }: { lines: readonly DerivedLine[] }) {
   if (lines.length === 0) return null;
   return (
-    <dl className="grid gap-x-8 gap-y-0.5 sm:grid-cols-2 dock-side:grid-cols-1">
-      {lines.map(({ key, label, value, unit }) => (
-        <div key={key} className="flex items-baseline justify-between gap-2">
-          <dt className="min-w-0 text-ink-muted text-sm leading-tight">{label}</dt>
-          <dd className="whitespace-nowrap">
-            <span className="font-bold tabular-nums">{value ?? '–'}</span>
-            {value !== null && unit && <span className="text-ink-muted text-sm"> {unit}</span>}
+    <dl className="grid grid-cols-2 gap-x-4 gap-y-0.5 sm:grid-cols-3 dock-side:grid-cols-2">
+      {lines.map((line) => (
+        <div key={line.key} className="relative flex min-h-12 flex-col-reverse justify-end">
+          <dt className="text-ink-muted text-sm leading-tight">{line.label}</dt>
+          <dd className="leading-tight">
+            <DerivedValue line={line} />
           </dd>
         </div>
       ))}
     </dl>
+  );
+}
+
+function DerivedValue({ line: { label, value, unit, remark, from } }: { line: DerivedLine }) {
+  if (value === null) {
+    return remark ? (
+      <span className="text-ink-muted text-sm">{remark}</span>
+    ) : (
+      <span className="font-bold">–</span>
+    );
+  }
+  return (
+    <>
+      <span className="font-bold tabular-nums">
+        {from ? (
+          <WorkedOutLink from={from} name={`${value} ${unit}: how ${label} is worked out`}>
+            {value}
+          </WorkedOutLink>
+        ) : (
+          value
+        )}
+      </span>
+      {unit && <span className="text-ink-muted text-sm"> {unit}</span>}
+    </>
   );
 }
 

@@ -1,5 +1,6 @@
 import { deriveCheck } from '@windrow/ventilation/board/derive-check';
-import { deriveGas } from '@windrow/ventilation/board/derive-gas';
+import { deriveGas, NOTHING_DERIVED } from '@windrow/ventilation/board/derive-gas';
+import { holdsAt } from '@windrow/ventilation/board/shown-bed';
 import type { BedStay, FactGroup, Flag } from '@windrow/ventilation/contract/board';
 import { MASK_INTERFACES } from '@windrow/ventilation/contract/observations';
 import { bedFlags } from '@windrow/ventilation/flags/bed-flags';
@@ -27,7 +28,8 @@ export function findingsOf({ plan, values, stay, thresholds, at }: FindingsInput
   const typed = typedStay({ plan, values, stay, at });
   if (typed === null) return NOTHING;
   const flags = thresholds === null ? [] : bedFlags({ stay: typed.stay, thresholds });
-  return { derived: typed.derived, flags: flags.filter((flag) => flag.from.includes(typed.group)) };
+  const told = flags.filter((flag) => flag.from.includes(typed.group) && holdsAt({ flag, at }));
+  return { derived: typed.derived, flags: told };
 }
 
 type Typed = { stay: BedStay; group: FactGroup; derived: readonly DerivedLine[] };
@@ -73,7 +75,10 @@ function withCheck({ plan, values, stay, at }: Omit<FindingsInput, 'thresholds'>
   return {
     stay: { ...stay, check: { ...check, derived } },
     group: 'check',
-    derived: checkDerivedLines({ mode, derived }),
+    derived: checkDerivedLines({
+      check: { ...check, derived },
+      predictedBodyWeightKg: stay.predictedBodyWeightKg,
+    }),
   };
 }
 
@@ -87,9 +92,13 @@ function withGas({ values, stay, at }: Pick<FindingsInput, 'values' | 'stay' | '
         predictedBodyWeightKg: stay.predictedBodyWeightKg,
         minuteVolumeLMin: stay.check?.readings.minuteVolumeLMin ?? null,
       })
-    : { pfMmHg: null, ventilatoryRatio: null };
+    : NOTHING_DERIVED;
   const gas = { ...stampAt(at), site, values: numbersIn(values), ...derived };
-  return { stay: { ...stay, gas }, group: 'gas', derived: gasDerivedLines(derived) };
+  return {
+    stay: { ...stay, gas },
+    group: 'gas',
+    derived: gasDerivedLines({ gas, predictedBodyWeightKg: stay.predictedBodyWeightKg }),
+  };
 }
 
 function withAirway({ values, stay, at }: Pick<FindingsInput, 'values' | 'stay' | 'at'>): Typed {

@@ -70,13 +70,15 @@ export function textRow({
   label,
   hint = '',
   needed = false,
+  isDay = false,
 }: {
   key: string;
   label: string;
   hint?: string;
   needed?: boolean;
+  isDay?: boolean;
 }): TextRow {
-  return { kind: 'text', key, label, hint, needed, before: { state: 'none' } };
+  return { kind: 'text', key, label, hint, needed, isDay, before: { state: 'none' } };
 }
 
 export const NOTE_SECTION = { title: 'Note', rows: [textRow({ key: 'note', label: 'Note' })] } as const;

@@ -1,9 +1,16 @@
 import { TextField } from '@windrow/ui/controls/text-field';
+import { formatDay } from '@windrow/ventilation/format/clock';
 import type { TextRow } from './entry-field.ts';
 import { rowId } from './row-id.ts';
 
 /** The contract's longest note. */
 const LONGEST = 500;
+
+/** Each device writes a date in its own order, so the day is said again in words that no country reads otherwise. */
+function dayHint(hint: string, text: string): string {
+  const day = /^\d{4}-\d{2}-\d{2}$/.test(text) ? formatDay(text) : '';
+  return [hint, day].filter((part) => part !== '').join(' · ');
+}
 
 export function TextRowView({
   row,
@@ -23,8 +30,9 @@ export function TextRowView({
       <TextField
         id={rowId(row.key)}
         label={row.label}
-        hint={row.hint}
+        hint={row.isDay ? dayHint(row.hint, text) : row.hint}
         error={fault ?? undefined}
+        type={row.isDay ? 'date' : 'text'}
         aria-required={row.needed}
         maxLength={LONGEST}
         value={text}

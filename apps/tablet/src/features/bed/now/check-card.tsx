@@ -1,3 +1,4 @@
+import { notPassiveWords } from '@windrow/ventilation/board/passive-breath';
 import type { ShownBed } from '@windrow/ventilation/board/shown-bed';
 import type { BedCheck, BedStay } from '@windrow/ventilation/contract/board';
 import { LIMIT_FIELDS, READING_FIELDS, SETTING_FIELDS } from '@windrow/ventilation/entry/fields';
@@ -24,7 +25,7 @@ export function CheckCard({ shown, stay, now, timeZone }: CardProps) {
       )}
       {check && (
         <div className="flex gap-4">
-          <CheckValues check={check} hasWeight={stay.predictedBodyWeightKg !== null} />
+          <CheckValues check={check} predictedBodyWeightKg={stay.predictedBodyWeightKg} />
           <CheckLadder check={check} plateauLimitCmH2O={stay.plateauLimitCmH2O} />
         </div>
       )}
@@ -32,16 +33,36 @@ export function CheckCard({ shown, stay, now, timeZone }: CardProps) {
   );
 }
 
-function CheckValues({ check, hasWeight }: { check: BedCheck; hasWeight: boolean }) {
+function CheckValues({
+  check,
+  predictedBodyWeightKg,
+}: {
+  check: BedCheck;
+  predictedBodyWeightKg: number | null;
+}) {
   return (
     <div className="mt-2 min-w-0 grow">
       <ValueGrid
         title={`Settings of ${supportEntry(check.mode).shortName}`}
         values={shownValues(check.settings, SETTING_FIELDS)}
       />
-      <ValueGrid title="Readings" values={shownValues(check.readings, READING_FIELDS)} />
-      <ValueGrid title="Worked out" values={shownDerived(checkDerivedLines(check))} />
-      {!hasWeight && (
+      <ValueGrid
+        title="Readings"
+        values={shownValues(check.readings, READING_FIELDS).map((shown) =>
+          shown.key === 'plateauCmH2O' ? { ...shown, remark: notPassiveWords(check) } : shown,
+        )}
+      />
+      <ValueGrid
+        title="Worked out"
+        values={shownDerived(checkDerivedLines({ check, predictedBodyWeightKg }))}
+      />
+      {check.readings.plateauCmH2O !== undefined && notPassiveWords(check) !== null && (
+        <p className="mt-1 text-ink-muted">
+          The plateau is shown as entered ({notPassiveWords(check)}): no driving pressure, compliance or power
+          is worked out from it.
+        </p>
+      )}
+      {predictedBodyWeightKg === null && (
         <p className="text-ink-muted">No height or sex is recorded, so nothing is judged per kg.</p>
       )}
       <ValueGrid title="Alarm limits as set" values={shownValues(check.limits, LIMIT_FIELDS)} />

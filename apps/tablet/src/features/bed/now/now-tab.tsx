@@ -20,7 +20,13 @@ export function NowTab() {
         <GasCard shown={shown} stay={stay} now={now} timeZone={timeZone} />
       </div>
       <div className="flex min-w-0 flex-col gap-3">
-        <FlagList flags={stay.flags} />
+        <FlagList
+          flags={stay.flags}
+          stayId={stay.stayId}
+          mayRecord={may(grants, 'record', bed.unitId)}
+          now={now}
+          timeZone={timeZone}
+        />
         <BedVentilator bed={bed} grants={grants} />
         {may(grants, 'place-stay', bed.unitId) && (
           <StayActions bed={bed} stay={stay} now={now} timeZone={timeZone} />

@@ -23,7 +23,7 @@ export function shownValues(
 }
 
 export function shownDerived(lines: readonly DerivedLine[]): ShownValue[] {
-  return lines.flatMap(({ key, label, value, unit }) =>
-    value === null ? [] : [{ key, label, value, unit }],
+  return lines.flatMap(({ key, label, value, unit, from }) =>
+    value === null ? [] : [{ key, label, value, unit, from }],
   );
 }

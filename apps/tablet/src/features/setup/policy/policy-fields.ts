@@ -35,6 +35,10 @@ export const THRESHOLDS = [
   { key: 'cuffHighCmH2O', label: 'Cuff pressure above', unit: 'cmH2O', step: 1 },
   { key: 'depthMovedCm', label: 'Tube moved by', unit: 'cm', step: 0.5 },
   { key: 'rateAboveSetPerMin', label: 'Rate above set by', unit: '/min', step: 1 },
+  { key: 'screenHoldsHours', label: 'Readiness screen stands for', unit: 'h', step: 1 },
+  { key: 'trialDueHours', label: 'Breathing trial due after the screen', unit: 'h', step: 0.5 },
+  { key: 'trialAgainHours', label: 'No second trial within', unit: 'h', step: 1 },
+  { key: 'suctionMaxPercent', label: 'Suction catheter fills at most', unit: '% of the tube', step: 1 },
 ] as const satisfies readonly {
   key: keyof Policy['thresholds'];
   label: string;

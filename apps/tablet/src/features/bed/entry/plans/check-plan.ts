@@ -7,7 +7,7 @@ import {
 } from '@windrow/ventilation/entry/fields';
 import { SUPPORT_CATALOGUE, type SupportEntry } from '@windrow/ventilation/support/catalogue';
 import { flagOf, pick } from '../entry-body.ts';
-import type { EntrySection, EntryValues } from '../entry-field.ts';
+import type { EntryRow, EntrySection, EntryValues } from '../entry-field.ts';
 import type { EntryPlan } from '../entry-plan.ts';
 import { choiceRow, type Earlier, NOTE_SECTION, numberRow, optionsOf, YES_NO } from '../rows.ts';
 import { MASK_WORDS } from '../words.ts';
@@ -66,12 +66,16 @@ function sectionsOf({
     ...entry.required.map((key) => numberRow({ key, field: SETTING_FIELDS[key], earlier, needed: true })),
     ...entry.optional.map((key) => numberRow({ key, field: SETTING_FIELDS[key], earlier })),
   ];
-  const readings = entry.readings.map((key) => numberRow({ key, field: READING_FIELDS[key], earlier }));
+  // Only where a pause can be held does it matter whether the patient made an effort, and there it stands beside it.
   const passive = choiceRow({
     key: 'passive',
     label: 'Patient passive (no effort)',
     options: YES_NO,
     earlier,
+  });
+  const readings = entry.readings.flatMap<EntryRow>((key) => {
+    const row = numberRow({ key, field: READING_FIELDS[key], earlier });
+    return key === 'plateauCmH2O' ? [row, passive] : [row];
   });
   const mask = choiceRow({
     key: 'interface',
@@ -81,8 +85,7 @@ function sectionsOf({
   });
   return [
     { title: 'Settings', rows: entry.wantsInterface ? [...settings, mask] : settings, mayRepeat },
-    // Only where a pause can be held does it matter whether the patient made an effort.
-    { title: 'Readings', rows: entry.readings.includes('plateauCmH2O') ? [...readings, passive] : readings },
+    { title: 'Readings', rows: readings },
     { title: 'Alarm limits', rows: entry.limits.map((key) => limitRow(key, earlier)) },
   ].filter(({ rows }) => rows.length > 0);
 }
