@@ -13,7 +13,10 @@ export async function openPart(
   page: Page,
   part: 'Now' | 'Check' | 'Airway' | 'Gas' | 'Happening' | 'Readiness' | 'Aids' | 'Record',
 ): Promise<void> {
-  await page.getByRole('navigation', { name: /^Bed / }).getByRole('link', { name: part }).tap();
+  await page
+    .getByRole('navigation', { name: /^Bed / })
+    .getByRole('link', { name: new RegExp(`^${part}( |$)`) })
+    .tap();
 }
 
 /** Types a number on the docked keypad, key by key. */

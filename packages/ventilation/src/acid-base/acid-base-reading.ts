@@ -31,7 +31,7 @@ const READABLE_BICARBONATE = [1, 100] as const;
  * An arterial gas in the words of acid and base. pH outside 7.35–7.45 names acidaemia or alkalaemia; the side
  * of 7.40 on which pH lies decides which of a PaCO2 outside 35–45 mmHg and a bicarbonate outside 22–26 mmol/L
  * is primary; compensation outside the band of its rule is a second disorder. A reading of three numbers, with
- * their usual pitfalls: anion gap, albumin and the course are not in it.
+ * their usual pitfalls: anion gap, albumin and how it came about are not in it.
  *
  * @param input.ph arterial pH (6.5 to 8).
  * @param input.paco2MmHg arterial CO2 pressure, mmHg (5 to 250).
